@@ -1,0 +1,99 @@
+import { DAY_S, ZERO_CELSIUS_K } from '../units';
+import type { EvaluationAnswer, EvaluationDescription, WallAnswer, WallOnLeg } from './description/evaluation';
+import { TARGET_DAYS } from './description/ranges';
+import { readList, readNumber } from './description/read-number';
+import { readStorage } from './description/read-storage';
+import { warningsOf } from './evaluation-warnings';
+import { describePack } from './pack-conductance';
+import { standardTests } from './standard-tests';
+import { answerOf } from './storage-answer';
+import { RELATIVE_TOLERANCE, runStorage, type StorageRun } from './storage-run';
+import type { StorageSystem } from './storage-system';
+import { ENGINE_VERSION } from './version';
+import { testWall } from './wall-in-test';
+import { describeWall } from './wall-profile';
+
+/** Legs of the first pass that are shown one by one. */
+export const MOST_LEGS_SHOWN = 60;
+const TEST_COUNT = { min: 0, max: 50 };
+
+/**
+ * The whole answer to a whole description: days to each limit, the walls as each leg begins and in tests, the pack's
+ * conductances, and what to be careful about.
+ * Range: description/ranges.ts. Errors: InputError for a description that cannot be computed with. Every number in the
+ * answer is finite. Cost: that of `storage`, and some 20 µs for each wall on each leg shown.
+ */
+export function evaluate(description: EvaluationDescription): EvaluationAnswer {
+  const system = readStorage(description);
+  const targetDays =
+    description.target_days === undefined || description.target_days === null
+      ? null
+      : readNumber(description.target_days, 'target_days', TARGET_DAYS, { label: 'Target', unit: 'days' });
+  const tests = description.tests ?? standardTests;
+  readList(tests, 'tests', TEST_COUNT, 'Tests');
+  const run = runStorage(system, MOST_LEGS_SHOWN);
+  const answer = answerOf(description, system, run);
+  const walls = system.pack.walls.map((wall, i): WallAnswer => ({
+    name: wall.name,
+    area_m2: wall.areaM2,
+    layers: wall.layers.map((layer) => ({
+      name: layer.name,
+      kind: layer.kind,
+      thickness_um: Number((layer.thicknessM * 1e6).toPrecision(15)),
+    })),
+    legs: wallOnLegs(system, run, i),
+    tests: tests.map((test, k) => testWall(wall.layers, test, `tests[${k}]`)),
+  }));
+  const pack = run.legStarts.map((start) => {
+    const { pack: at, humidity } = run.conditions[start.leg];
+    at.conduct(humidity, start.insideHumidity);
+    return { leg: start.leg, starts_day: start.atS / DAY_S, ...describePack(at) };
+  });
+  return {
+    engine_version: ENGINE_VERSION,
+    ...answer,
+    target:
+      targetDays === null
+        ? null
+        : {
+            days: targetDays,
+            is_met: answer.shelf_life_days === null
+              ? description.horizon_days >= targetDays
+              : answer.shelf_life_days >= targetDays,
+            margin_days: answer.shelf_life_days === null ? null : answer.shelf_life_days - targetDays,
+          },
+    walls,
+    pack,
+    warnings: warningsOf(system, run, walls),
+    solver: {
+      method:
+        run.counters.acceptedSteps > 0 ? 'Clenshaw–Curtis quadrature and collocation of degree 8, adaptive' : 'closed form',
+      status: run.counters.isStepLimitReached ? 'step limit reached' : 'finished',
+      relative_tolerance: RELATIVE_TOLERANCE,
+      accepted_steps: run.counters.acceptedSteps,
+      rejected_steps: run.counters.rejectedSteps,
+      rate_evaluations: run.counters.rateEvaluations,
+      wall_solutions: run.wallSolutions,
+    },
+  };
+}
+
+function wallOnLegs(system: StorageSystem, run: StorageRun, wallIndex: number): WallOnLeg[] {
+  return run.legStarts.map((start) => {
+    const conditions = run.conditions[start.leg];
+    const state = describeWall(conditions.pack.walls[wallIndex], {
+      humidityOutside: conditions.humidity,
+      humidityInside: start.insideHumidity,
+      oxygenOutsidePa: conditions.outsideOxygenPa,
+      oxygenInsidePa: start.insideOxygenPa,
+    });
+    const { name } = system.legs[start.leg];
+    return {
+      ...state,
+      temperature_C: Number((conditions.temperatureK - ZERO_CELSIUS_K).toFixed(9)),
+      leg: start.leg,
+      ...(name === undefined ? {} : { leg_name: name }),
+      starts_day: start.atS / DAY_S,
+    };
+  });
+}

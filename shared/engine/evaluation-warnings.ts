@@ -1,0 +1,215 @@
+import { ZERO_CELSIUS_K } from '../units';
+import type { EngineWarning, WallAnswer } from './description/evaluation';
+import { LIMIT_NAMES } from './description/read-storage';
+import type { LimitName } from './description/storage-description';
+import type { GasInLayer, Layer } from './layer';
+import { isBeyondMeasured, isFarFromReference, TRUSTED_BEYOND_K } from './measured-range';
+import type { StorageRun } from './storage-run';
+import type { StorageSystem } from './storage-system';
+import { WallAtTemperature } from './wall-at-temperature';
+
+/** A layer's oxygen permeance must change by more than this, turned round, to be worth a sentence. */
+const ORIENTATION_MATTERS_ABOVE = 0.01;
+
+const LIMIT_WORDS: Record<LimitName, string> = {
+  oxygen_uptake_mg_per_kg: 'oxygen uptake',
+  headspace_oxygen_percent: 'headspace oxygen',
+  moisture_max_g_per_g: 'highest moisture',
+  moisture_min_g_per_g: 'lowest moisture',
+};
+
+/** What to be careful about, each said once. */
+export function warningsOf(system: StorageSystem, run: StorageRun, walls: WallAnswer[]): EngineWarning[] {
+  const warnings: EngineWarning[] = [
+    ...passedAtPacking(run, system),
+    ...system.pack.walls.flatMap((wall, w) =>
+      wall.layers.flatMap((layer, l) => layerWarnings(layer, `pack.walls[${w}].layers[${l}]`, system, walls[w], l)),
+    ),
+    ...sealWarnings(system, run),
+    ...walls.flatMap((wall, w) => belowMeasurable(wall, w)),
+    ...system.pack.walls.flatMap((wall, w) => orientation(wall.layers, w, walls[w], run)),
+    ...rateWarnings(system),
+  ];
+  const seen = new Set<string>();
+  return warnings.filter((warning) => {
+    const key = `${warning.code} ${warning.path} ${warning.message}`;
+    if (seen.has(key)) return false;
+    seen.add(key);
+    return true;
+  });
+}
+
+function passedAtPacking(run: StorageRun, system: StorageSystem): EngineWarning[] {
+  const at: Record<LimitName, number | null> = {
+    oxygen_uptake_mg_per_kg: run.oxygen.uptakeReachedAtS,
+    headspace_oxygen_percent: run.oxygen.headspaceReachedAtS,
+    moisture_max_g_per_g: run.moisture.maxReachedAtS,
+    moisture_min_g_per_g: run.moisture.minReachedAtS,
+  };
+  return LIMIT_NAMES.filter((name) => system.limits[name] !== undefined && at[name] === 0).map((name) => ({
+    code: 'limit_passed_at_packing',
+    path: `limits.${name}`,
+    message: `The limit on ${LIMIT_WORDS[name]} is already passed when the pack is closed.`,
+  }));
+}
+
+const celsius = (kelvin: number): string => `${Number((kelvin - ZERO_CELSIUS_K).toFixed(2))} °C`;
+const percent = (fraction: number): string => `${Number((fraction * 100).toPrecision(4))} %`;
+
+function temperatureWarning(gas: GasInLayer, path: string, words: string, temperatures: number[]): EngineWarning[] {
+  const beyond = temperatures.filter((temperatureK) => isBeyondMeasured(gas, temperatureK));
+  if (beyond.length > 0) {
+    const low = gas.measuredMinK === null ? '' : `from ${celsius(gas.measuredMinK)} `;
+    const high = gas.measuredMaxK === null ? '' : `to ${celsius(gas.measuredMaxK)}`;
+    return [
+      {
+        code: 'temperature_outside_measured',
+        path,
+        message:
+          `${words}: its activation energy was measured ${low}${high}`.trimEnd() +
+          `; ${listed(beyond)} lies more than ${TRUSTED_BEYOND_K} K outside.`,
+      },
+    ];
+  }
+  const far = temperatures.filter((temperatureK) => isFarFromReference(gas, temperatureK));
+  if (far.length === 0) return [];
+  return [
+    {
+      code: 'temperature_range_unknown',
+      path,
+      message:
+        `${words}: nobody says at which temperatures its activation energy holds; ${listed(far)} lies more than ` +
+        `${TRUSTED_BEYOND_K} K from its reference, ${celsius(gas.referenceK)}.`,
+    },
+  ];
+}
+
+/** The coldest and the warmest of what is beyond. */
+function listed(temperatures: number[]): string {
+  const low = Math.min(...temperatures);
+  const high = Math.max(...temperatures);
+  return low === high ? celsius(low) : `${celsius(low)} to ${celsius(high)}`;
+}
+
+function layerWarnings(
+  layer: Layer,
+  path: string,
+  system: StorageSystem,
+  wall: WallAnswer,
+  index: number,
+): EngineWarning[] {
+  const temperatures = [...new Set(system.legs.map((leg) => leg.temperatureK))];
+  const faces = wall.legs.flatMap((leg) => leg.water.interface_relative_humidity.slice(index, index + 2));
+  const warnings: EngineWarning[] = [];
+  for (const name of ['oxygen', 'water'] as const) {
+    const gas = layer[name];
+    if (!gas) continue;
+    const words = `${layer.name}, ${name}`;
+    warnings.push(...temperatureWarning(gas, `${path}.${name}`, words, temperatures));
+    warnings.push(...humidityWarning(gas, `${path}.${name}`, words, faces));
+  }
+  if (layer.defects) {
+    warnings.push({
+      code: 'pinholes_are_estimated',
+      path: `${path}.defects`,
+      message:
+        `${layer.name}: what passes its ${Number(layer.defects.densityPerM2.toPrecision(3))} pinholes per m² of ` +
+        `${Number((layer.defects.radiusM * 2e6).toPrecision(3))} µm is an estimate, good to some 8 % for single holes.`,
+    });
+  }
+  return warnings;
+}
+
+function humidityWarning(gas: GasInLayer, path: string, words: string, faces: number[]): EngineWarning[] {
+  const { curve } = gas;
+  if (!curve) return [];
+  const beyond = faces.filter((humidity) => isClearlyBeyond(curve.humidity, humidity));
+  if (beyond.length === 0) return [];
+  const first = curve.humidity[0];
+  const last = curve.humidity[curve.humidity.length - 1];
+  const low = Math.min(...beyond);
+  const high = Math.max(...beyond);
+  return [
+    {
+      code: 'humidity_beyond_curve',
+      path: `${path}.humidity_curve`,
+      message:
+        `${words}: its humidity curve runs from ${percent(first)} to ${percent(last)}; on this route the layer sees ` +
+        `${low === high ? percent(low) : `${percent(low)} to ${percent(high)}`}, where the last point is held.`,
+    },
+  ];
+}
+
+/** Beyond the points by more than rounding of an interface. */
+function isClearlyBeyond(points: Float64Array, humidity: number): boolean {
+  return humidity < points[0] - 1e-9 || humidity > points[points.length - 1] + 1e-9;
+}
+
+function sealWarnings(system: StorageSystem, run: StorageRun): EngineWarning[] {
+  const { seal } = system.pack;
+  if (!seal || seal.areaM2 === 0) return [];
+  const temperatures = [...new Set(system.legs.map((leg) => leg.temperatureK))];
+  const faces = run.legStarts.flatMap((start) => [run.conditions[start.leg].humidity, start.insideHumidity]);
+  return (['oxygen', 'water'] as const).flatMap((name) => {
+    const gas = seal.film[name];
+    if (!gas) return [];
+    return [
+      ...temperatureWarning(gas, `pack.seal.${name}`, `Seal, ${name}`, temperatures),
+      ...humidityWarning(gas, `pack.seal.${name}`, `Seal, ${name}`, faces),
+    ];
+  });
+}
+
+function belowMeasurable(wall: WallAnswer, index: number): EngineWarning[] {
+  const low = wall.tests.filter((test) => test.is_below_measurable);
+  return (['oxygen', 'water'] as const).flatMap((gas) => {
+    if (!low.some((test) => test.test.gas === gas)) return [];
+    const unit = gas === 'oxygen' ? 'cm³' : 'g';
+    return [
+      {
+        code: 'below_measurable' as const,
+        path: `pack.walls[${index}]`,
+        message:
+          `${wall.name}: less ${gas === 'oxygen' ? 'oxygen' : 'water vapour'} passes than laboratories can measure ` +
+          `(0.005 ${unit} per m² and day); seals, leaks and pinholes decide.`,
+      },
+    ];
+  });
+}
+
+function orientation(layers: Layer[], index: number, wall: WallAnswer, run: StorageRun): EngineWarning[] {
+  if (!layers.some((layer) => layer.oxygen?.curve || layer.water?.curve)) return [];
+  const turned = [...layers].reverse();
+  let most = 0;
+  let message = '';
+  for (const leg of wall.legs) {
+    const start = run.legStarts.find((candidate) => candidate.leg === leg.leg);
+    if (!start) continue;
+    const other = new WallAtTemperature(turned, run.conditions[leg.leg].temperatureK);
+    other.solve(leg.relative_humidity_outside, leg.relative_humidity_inside);
+    const as = leg.oxygen.permeance_mol_per_m2_s_Pa;
+    if (!(as > 0)) continue;
+    const change = other.oxygenPermeance / as - 1;
+    if (Math.abs(change) <= Math.max(most, ORIENTATION_MATTERS_ABOVE)) continue;
+    most = Math.abs(change);
+    message =
+      `${wall.name}: turned round it would let through ${Number((Math.abs(change) * 100).toPrecision(2))} % ` +
+      `${change > 0 ? 'more' : 'less'} oxygen at ${celsius(run.conditions[leg.leg].temperatureK)}, ` +
+      `${percent(leg.relative_humidity_outside)} outside and ${percent(leg.relative_humidity_inside)} inside: ` +
+      `${as.toExponential(2)} mol/(m²·s·Pa) as laid, ${other.oxygenPermeance.toExponential(2)} turned, because its ` +
+      'humidity-sensitive layer would sit at another humidity.';
+  }
+  return message === '' ? [] : [{ code: 'orientation_matters', path: `pack.walls[${index}].layers`, message }];
+}
+
+function rateWarnings(system: StorageSystem): EngineWarning[] {
+  const { food } = system;
+  if (food.oxygenMode !== 'rate' || food.rateEnergyJPerMol !== 0) return [];
+  return [
+    {
+      code: 'rate_constant_without_energy',
+      path: 'food.rate_activation_energy_J_per_mol',
+      message: 'No activation energy is given for the oxygen uptake, so its rate is the same at every temperature.',
+    },
+  ];
+}

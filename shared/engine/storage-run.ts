@@ -1,0 +1,301 @@
+import { WATER_MOLAR_MASS } from '../units';
+import { DEGREE, openEnd, whereReaches } from './chebyshev';
+import { MarchStep } from './march-step';
+import { MoistureTracker } from './moisture-tracker';
+import { OxygenStore } from './oxygen-store';
+import { conditionsOf, type LegConditions, type StorageSystem } from './storage-system';
+
+/** Relative error a step may leave open, against time and oxygen passed since day 0. */
+const STEP_TOLERANCE = 1e-8;
+/** What the whole promises, relative in days. */
+export const RELATIVE_TOLERANCE = 1e-6;
+/** Closer than this to the air outside, the food counts as at rest with it. */
+const AT_REST = 1e-12;
+const MOST_STEPS = 400_000;
+
+export interface LegStart {
+  leg: number;
+  atS: number;
+  insideHumidity: number;
+  insideOxygenPa: number;
+}
+
+export interface RunCounters {
+  acceptedSteps: number;
+  rejectedSteps: number;
+  rateEvaluations: number;
+  isStepLimitReached: boolean;
+}
+
+/** How far a run got, and where everything stood. */
+export interface StorageRun {
+  oxygen: OxygenStore;
+  moisture: MoistureTracker;
+  legStarts: LegStart[];
+  counters: RunCounters;
+  wallSolutions: number;
+  conditions: LegConditions[];
+  /** Index of the leg in which the run ended. */
+  lastLeg: number;
+}
+
+/**
+ * Carries a pack along its route: moisture and oxygen together, from day 0 to the horizon or until all is known.
+ *
+ * Moisture of a leg is one autonomous equation, m_dry dX/dt = M_w K_w p_sat (h_out − a), and a only ever nears h_out. So
+ * ζ = ln(z_0/z), z = h_out − a, is taken as the independent variable: dt/dζ = m_dry X′(a)/(M_w p_sat K_w) is smooth and
+ * never stiff, however near the food is to rest, and time becomes an integral. It is taken in steps of adaptive width by
+ * Clenshaw–Curtis quadrature of degree 8 (chebyshev.ts); what the last two coefficients leave open decides a step. A
+ * moisture limit is a known ζ; times are read from the integral's own polynomial. Oxygen rides on the same points
+ * (oxygen-store.ts). Where nothing varies, closed forms take the whole leg.
+ * Every leg begins anew. Cost: 8 pack conductances per step.
+ */
+export function runStorage(system: StorageSystem, firstLegsToSee: number): StorageRun {
+  return new Runner(system, firstLegsToSee).run();
+}
+
+class Runner {
+  private readonly conditions: LegConditions[];
+  private readonly oxygen: OxygenStore;
+  private readonly moisture: MoistureTracker;
+  private readonly counters: RunCounters = {
+    acceptedSteps: 0,
+    rejectedSteps: 0,
+    rateEvaluations: 0,
+    isStepLimitReached: false,
+  };
+  private readonly step = new MarchStep();
+  private readonly legStarts: LegStart[] = [];
+  private readonly dryMassKg: number;
+  private timeS = 0;
+  private lastLeg = 0;
+
+  constructor(
+    private readonly system: StorageSystem,
+    private readonly firstLegsToSee: number,
+  ) {
+    this.conditions = conditionsOf(system);
+    this.oxygen = new OxygenStore(system, this.conditions[0]);
+    this.moisture = new MoistureTracker(system);
+    this.dryMassKg = system.food.massKg / (1 + system.food.initialMoisture);
+  }
+
+  run(): StorageRun {
+    const { legs, isRepeated, horizonS } = this.system;
+    let begun = 0;
+    let endS = 0;
+    while (this.timeS < horizonS) {
+      const index = isRepeated ? begun % legs.length : Math.min(begun, legs.length - 1);
+      const isHeld = !isRepeated && index === legs.length - 1;
+      endS = isHeld ? horizonS : Math.min(horizonS, endS + legs[index].durationS);
+      this.runLeg(index, begun, endS);
+      this.timeS = endS;
+      begun += 1;
+      if (this.counters.isStepLimitReached || this.isAllKnown(begun)) break;
+    }
+    this.oxygen.finish();
+    this.moisture.finish();
+    const packs = new Set(this.conditions.map((conditions) => conditions.pack));
+    let wallSolutions = 0;
+    for (const pack of packs) wallSolutions += pack.solutions();
+    return {
+      oxygen: this.oxygen,
+      moisture: this.moisture,
+      legStarts: this.legStarts,
+      counters: this.counters,
+      wallSolutions,
+      conditions: this.conditions,
+      lastLeg: this.lastLeg,
+    };
+  }
+
+  /** True once no answer can change any more. */
+  private isAllKnown(begun: number): boolean {
+    const { limits, legs, absorberMol } = this.system;
+    return (
+      begun >= Math.min(this.firstLegsToSee, legs.length) &&
+      (limits.oxygen_uptake_mg_per_kg === undefined || this.oxygen.uptakeReachedAtS !== null) &&
+      (limits.headspace_oxygen_percent === undefined || this.oxygen.headspaceReachedAtS !== null) &&
+      (limits.moisture_max_g_per_g === undefined || this.moisture.maxReachedAtS !== null) &&
+      (limits.moisture_min_g_per_g === undefined || this.moisture.minReachedAtS !== null) &&
+      this.oxygen.isReported &&
+      (absorberMol === 0 || this.oxygen.exhaustedAtS !== null)
+    );
+  }
+
+  private insideHumidity(): number {
+    const { food } = this.system;
+    return food.isotherm ? food.isotherm.activity(this.moisture.moisture) : food.insideHumidity;
+  }
+
+  private runLeg(index: number, begun: number, endS: number): void {
+    const conditions = this.conditions[index];
+    this.lastLeg = index;
+    this.oxygen.beginLeg(conditions, this.timeS);
+    if (begun < this.system.legs.length && this.legStarts.length < this.firstLegsToSee) {
+      const inside = this.insideHumidity();
+      conditions.pack.conduct(conditions.humidity, inside);
+      this.legStarts.push({
+        leg: index,
+        atS: this.timeS,
+        insideHumidity: inside,
+        insideOxygenPa: this.oxygen.insidePressure(conditions.pack.oxygen),
+      });
+    }
+    while (this.timeS < endS && !this.counters.isStepLimitReached) this.runPiece(conditions, endS);
+  }
+
+  private runPiece(conditions: LegConditions, endS: number): void {
+    const { isotherm } = this.system.food;
+    const { pack, humidity } = conditions;
+    const inside = this.insideHumidity();
+    const distance = humidity - inside;
+    if (isotherm === null || Math.abs(distance) <= AT_REST) {
+      this.rest(conditions, inside, endS);
+      return;
+    }
+    pack.conduct(humidity, inside, distance);
+    this.counters.rateEvaluations += 1;
+    if (pack.water === 0) {
+      this.rest(conditions, inside, endS);
+      return;
+    }
+    const held = isotherm.moisture(inside);
+    const isPinned = inside === 0 ? this.moisture.moisture < held : inside === 1 && this.moisture.moisture > held;
+    if (isPinned) this.slide(conditions, inside, held, endS);
+    else if (isotherm.isLinear && !pack.isWaterHumid && !pack.isOxygenHumid) this.decay(conditions, distance, endS);
+    else this.march(conditions, distance, endS);
+  }
+
+  /** Nothing moves but oxygen. */
+  private rest(conditions: LegConditions, inside: number, endS: number): void {
+    const { pack, humidity } = conditions;
+    pack.conduct(humidity, inside);
+    this.counters.rateEvaluations += 1;
+    this.oxygen.advanceConstant(pack.oxygen, this.timeS, endS - this.timeS);
+    this.moisture.rest(endS);
+    this.timeS = endS;
+  }
+
+  /** Moisture beyond what the isotherm gives at 0 or 1: activity is held there, so moisture changes evenly. */
+  private slide(conditions: LegConditions, inside: number, held: number, endS: number): void {
+    const { pack, humidity, saturationPa } = conditions;
+    const startS = this.timeS;
+    const start = this.moisture.moisture;
+    const speed = (WATER_MOLAR_MASS * pack.water * saturationPa * (humidity - inside)) / this.dryMassKg;
+    const arrivesS = startS + (held - start) / speed;
+    const isArriving = arrivesS <= endS;
+    const untilS = isArriving ? arrivesS : endS;
+    this.oxygen.advanceConstant(pack.oxygen, startS, untilS - startS);
+    this.moisture.advance(isArriving ? held : start + speed * (endS - startS), untilS, {
+      whenAt: (moisture) => startS + (moisture - start) / speed,
+      moistureAt: (atS) => start + speed * (atS - startS),
+    });
+    this.timeS = untilS;
+  }
+
+  /** Linear isotherm and constant conductances: Labuza's closed form for the whole leg. */
+  private decay(conditions: LegConditions, distance: number, endS: number): void {
+    const { isotherm } = this.system.food;
+    if (isotherm === null) return;
+    const { pack, saturationPa } = conditions;
+    const startS = this.timeS;
+    const start = this.moisture.moisture;
+    const slope = isotherm.slope(0);
+    const lifetimeS = (this.dryMassKg * slope) / (WATER_MOLAR_MASS * pack.water * saturationPa);
+    const moistureAt = (atS: number): number => start - slope * distance * Math.expm1(-(atS - startS) / lifetimeS);
+    this.oxygen.advanceConstant(pack.oxygen, startS, endS - startS);
+    this.moisture.advance(moistureAt(endS), endS, {
+      whenAt: (moisture) => startS - lifetimeS * Math.log1p(-(moisture - start) / (slope * distance)),
+      moistureAt,
+    });
+    this.timeS = endS;
+  }
+
+  /** Adaptive steps in ζ until the leg ends or the food is at rest. */
+  private march(conditions: LegConditions, startDistance: number, endS: number): void {
+    const { pack } = conditions;
+    const { step, counters } = this;
+    step.startDistance = startDistance;
+    let firstPace = this.paceAt(conditions, startDistance);
+    let firstOxygen = pack.oxygen;
+    let width = Math.min(1, (1.05 * (endS - this.timeS)) / firstPace);
+    while (this.timeS < endS && Math.abs(step.startDistance) > AT_REST) {
+      if (counters.acceptedSteps + counters.rejectedSteps >= MOST_STEPS) {
+        counters.isStepLimitReached = true;
+        return;
+      }
+      step.width = Math.min(width, Math.log(Math.abs(step.startDistance) / AT_REST) + 1e-3);
+      step.pace[0] = firstPace * step.width;
+      step.oxygen[0] = firstOxygen;
+      for (let node = 1; node <= DEGREE; node++) {
+        step.pace[node] = this.paceAt(conditions, step.nodeDistance(node)) * step.width;
+        step.oxygen[node] = pack.oxygen;
+      }
+      const lastPace = step.pace[DEGREE] / step.width;
+      const lastOxygen = step.oxygen[DEGREE];
+      step.settleTime();
+      let error = openEnd(step.paceCoefficients) / (STEP_TOLERANCE * (this.timeS + step.timeAt(1)));
+      if (pack.isOxygenHumid) error = Math.max(error, this.oxygen.prepareStep(step, STEP_TOLERANCE));
+      const change = Math.min(4, Math.max(0.15, 0.9 * error ** (-1 / DEGREE)));
+      if (error > 1 && step.width > 1e-13) {
+        counters.rejectedSteps += 1;
+        width = step.width * Math.min(change, 0.7);
+        continue;
+      }
+      counters.acceptedSteps += 1;
+      const remaining = endS - this.timeS;
+      const isLast = step.timeAt(1) >= remaining;
+      let x = isLast ? whereReaches((at) => step.timeAt(at), remaining) : 1;
+      if (pack.isOxygenHumid) {
+        const regimeX = this.oxygen.regimeEnd(x);
+        this.take(step, regimeX, pack, isLast && regimeX === x ? endS : this.timeS + step.timeAt(regimeX));
+        x = regimeX;
+      } else {
+        this.take(step, x, pack, isLast ? endS : this.timeS + step.timeAt(x));
+      }
+      step.startDistance = step.distanceAt(x);
+      if (x === 1) {
+        firstPace = lastPace;
+        firstOxygen = lastOxygen;
+      } else if (this.timeS < endS) {
+        firstPace = this.paceAt(conditions, step.startDistance);
+        firstOxygen = pack.oxygen;
+      }
+      width = Math.min(step.width * change, (1.05 * (endS - this.timeS)) / firstPace);
+    }
+    if (this.timeS < endS) this.rest(conditions, this.insideHumidity(), endS);
+  }
+
+  /** dt/dζ [s] at a distance from rest; leaves the pack's conductances behind. */
+  private paceAt(conditions: LegConditions, distance: number): number {
+    const { isotherm } = this.system.food;
+    if (isotherm === null) return Infinity;
+    const { pack, humidity, saturationPa } = conditions;
+    const inside = Math.min(1, Math.max(0, humidity - distance));
+    pack.conduct(humidity, inside, distance);
+    this.counters.rateEvaluations += 1;
+    return (this.dryMassKg * isotherm.slope(inside)) / (WATER_MOLAR_MASS * saturationPa * pack.water);
+  }
+
+  /** Books a step up to x, which ends at `untilS`. */
+  private take(step: MarchStep, x: number, pack: LegConditions['pack'], untilS: number): void {
+    const { isotherm } = this.system.food;
+    if (isotherm === null) return;
+    const startS = this.timeS;
+    const humidity = this.conditions[this.lastLeg].humidity;
+    const moistureOf = (distance: number): number =>
+      isotherm.moisture(Math.min(1, Math.max(0, humidity - distance)));
+    if (pack.isOxygenHumid) this.oxygen.commitStep(step, x, startS);
+    else this.oxygen.advanceConstant(pack.oxygen, startS, untilS - startS);
+    this.moisture.advance(moistureOf(step.distanceAt(x)), untilS, {
+      whenAt: (moisture) => {
+        const distance = humidity - isotherm.activity(moisture);
+        const at = Math.log(step.startDistance / distance) / step.width;
+        return startS + step.timeAt(at > 0 ? Math.min(at, x) : 0);
+      },
+      moistureAt: (atS) => moistureOf(step.distanceAt(whereReaches((part) => step.timeAt(part * x), atS - startS) * x)),
+    });
+    this.timeS = untilS;
+  }
+}

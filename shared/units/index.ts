@@ -1,0 +1,3 @@
+export * from './constants';
+export * from './unit-table';
+export * from './convert';
