@@ -7,7 +7,10 @@ export const DEGREE = 8;
 const COUNT = DEGREE + 1;
 
 /** Points of [0, 1], ascending. */
-export const NODES = Float64Array.from({ length: COUNT }, (_, k) => (1 - Math.cos((Math.PI * k) / DEGREE)) / 2);
+export const NODES = Float64Array.from(
+  { length: COUNT },
+  (_, k) => (1 - Math.cos((Math.PI * k) / DEGREE)) / 2,
+);
 
 /** Values at the nodes → Chebyshev coefficients. */
 const TO_COEFFICIENTS = new Float64Array(COUNT * COUNT);
@@ -15,7 +18,8 @@ for (let j = 0; j < COUNT; j++) {
   for (let k = 0; k < COUNT; k++) {
     const halves = (j === 0 || j === DEGREE ? 0.5 : 1) * (k === 0 || k === DEGREE ? 0.5 : 1);
     // Node k of [0, 1] is cos(π(DEGREE − k)/DEGREE) on [−1, 1].
-    TO_COEFFICIENTS[j * COUNT + k] = ((2 * halves) / DEGREE) * Math.cos((Math.PI * j * (DEGREE - k)) / DEGREE);
+    TO_COEFFICIENTS[j * COUNT + k] =
+      ((2 * halves) / DEGREE) * Math.cos((Math.PI * j * (DEGREE - k)) / DEGREE);
   }
 }
 

@@ -21,7 +21,8 @@ export function solveDense(augmented: Float64Array, n: number): void {
     for (let row = column + 1; row < n; row++) {
       const factor = augmented[row * width + column] / pivot;
       if (factor === 0) continue;
-      for (let k = column; k < width; k++) augmented[row * width + k] -= factor * augmented[column * width + k];
+      for (let k = column; k < width; k++)
+        augmented[row * width + k] -= factor * augmented[column * width + k];
     }
   }
   for (let row = n - 1; row >= 0; row--) {

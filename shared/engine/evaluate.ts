@@ -1,5 +1,10 @@
 import { DAY_S, ZERO_CELSIUS_K } from '../units';
-import type { EvaluationAnswer, EvaluationDescription, WallAnswer, WallOnLeg } from './description/evaluation';
+import type {
+  EvaluationAnswer,
+  EvaluationDescription,
+  WallAnswer,
+  WallOnLeg,
+} from './description/evaluation';
 import { TARGET_DAYS } from './description/ranges';
 import { readList, readNumber } from './description/read-number';
 import { readStorage } from './description/read-storage';
@@ -57,9 +62,10 @@ export function evaluate(description: EvaluationDescription): EvaluationAnswer {
         ? null
         : {
             days: targetDays,
-            is_met: answer.shelf_life_days === null
-              ? description.horizon_days >= targetDays
-              : answer.shelf_life_days >= targetDays,
+            is_met: isMet(targetDays, answer.shelf_life_days, {
+              horizonDays: description.horizon_days,
+              isCutShort: run.counters.isStepLimitReached,
+            }),
             margin_days: answer.shelf_life_days === null ? null : answer.shelf_life_days - targetDays,
           },
     walls,
@@ -67,7 +73,9 @@ export function evaluate(description: EvaluationDescription): EvaluationAnswer {
     warnings: warningsOf(system, run, walls),
     solver: {
       method:
-        run.counters.acceptedSteps > 0 ? 'Clenshaw–Curtis quadrature and collocation of degree 8, adaptive' : 'closed form',
+        run.counters.acceptedSteps > 0
+          ? 'Clenshaw–Curtis quadrature and collocation of degree 8, adaptive'
+          : 'closed form',
       status: run.counters.isStepLimitReached ? 'step limit reached' : 'finished',
       relative_tolerance: RELATIVE_TOLERANCE,
       accepted_steps: run.counters.acceptedSteps,
@@ -76,6 +84,16 @@ export function evaluate(description: EvaluationDescription): EvaluationAnswer {
       wall_solutions: run.wallSolutions,
     },
   };
+}
+
+/** With no limit reached a target is met as far as the route was followed. */
+function isMet(
+  targetDays: number,
+  shelfLifeDays: number | null,
+  route: { horizonDays: number; isCutShort: boolean },
+): boolean {
+  if (shelfLifeDays !== null) return shelfLifeDays >= targetDays;
+  return !route.isCutShort && route.horizonDays >= targetDays;
 }
 
 function wallOnLegs(system: StorageSystem, run: StorageRun, wallIndex: number): WallOnLeg[] {

@@ -23,7 +23,9 @@ export function warningsOf(system: StorageSystem, run: StorageRun, walls: WallAn
   const warnings: EngineWarning[] = [
     ...passedAtPacking(run, system),
     ...system.pack.walls.flatMap((wall, w) =>
-      wall.layers.flatMap((layer, l) => layerWarnings(layer, `pack.walls[${w}].layers[${l}]`, system, walls[w], l)),
+      wall.layers.flatMap((layer, l) =>
+        layerWarnings(layer, `pack.walls[${w}].layers[${l}]`, system, walls[w], l),
+      ),
     ),
     ...sealWarnings(system, run),
     ...walls.flatMap((wall, w) => belowMeasurable(wall, w)),
@@ -56,7 +58,12 @@ function passedAtPacking(run: StorageRun, system: StorageSystem): EngineWarning[
 const celsius = (kelvin: number): string => `${Number((kelvin - ZERO_CELSIUS_K).toFixed(2))} °C`;
 const percent = (fraction: number): string => `${Number((fraction * 100).toPrecision(4))} %`;
 
-function temperatureWarning(gas: GasInLayer, path: string, words: string, temperatures: number[]): EngineWarning[] {
+function temperatureWarning(
+  gas: GasInLayer,
+  path: string,
+  words: string,
+  temperatures: number[],
+): EngineWarning[] {
   const beyond = temperatures.filter((temperatureK) => isBeyondMeasured(gas, temperatureK));
   if (beyond.length > 0) {
     const low = gas.measuredMinK === null ? '' : `from ${celsius(gas.measuredMinK)} `;
@@ -199,7 +206,9 @@ function orientation(layers: Layer[], index: number, wall: WallAnswer, run: Stor
       `${as.toExponential(2)} mol/(m²·s·Pa) as laid, ${other.oxygenPermeance.toExponential(2)} turned, because its ` +
       'humidity-sensitive layer would sit at another humidity.';
   }
-  return message === '' ? [] : [{ code: 'orientation_matters', path: `pack.walls[${index}].layers`, message }];
+  return message === ''
+    ? []
+    : [{ code: 'orientation_matters', path: `pack.walls[${index}].layers`, message }];
 }
 
 function rateWarnings(system: StorageSystem): EngineWarning[] {
@@ -209,7 +218,8 @@ function rateWarnings(system: StorageSystem): EngineWarning[] {
     {
       code: 'rate_constant_without_energy',
       path: 'food.rate_activation_energy_J_per_mol',
-      message: 'No activation energy is given for the oxygen uptake, so its rate is the same at every temperature.',
+      message:
+        'No activation energy is given for the oxygen uptake, so its rate is the same at every temperature.',
     },
   ];
 }

@@ -1,6 +1,11 @@
 import { kindOf, toSi, UnitError, WATER_MOLAR_MASS, type QuantityKind } from '../units';
 import { InputError } from './description/input-error';
-import { OXYGEN_FRACTION, PERMEABILITY_SI, PERMEANCE_SI, REFERENCE_TEMPERATURE_C } from './description/ranges';
+import {
+  OXYGEN_FRACTION,
+  PERMEABILITY_SI,
+  PERMEANCE_SI,
+  REFERENCE_TEMPERATURE_C,
+} from './description/ranges';
 import { readHumidity, readTemperatureK } from './description/read-conditions';
 import { readCurve } from './description/read-layer';
 import { readChoice, readNumber } from './description/read-number';
@@ -58,8 +63,16 @@ export function gasFromStated(stated: StatedGas): FilmGasDescription | CoatingGa
   const gas = readChoice(stated.gas, 'gas', ['oxygen', 'water'] as const, 'Gas');
   const layerKind = readChoice(stated.kind, 'kind', ['film', 'coating'] as const, 'Kind of layer');
   const unitKind = suitableKind(stated, gas, layerKind);
-  readNumber(stated.value, 'value', { min: 0, max: Number.MAX_VALUE, isMinExcluded: true }, { label: 'Value' });
-  readNumber(stated.temperature_C, 'temperature_C', REFERENCE_TEMPERATURE_C, { label: 'Temperature', unit: '°C' });
+  readNumber(
+    stated.value,
+    'value',
+    { min: 0, max: Number.MAX_VALUE, isMinExcluded: true },
+    { label: 'Value' },
+  );
+  readNumber(stated.temperature_C, 'temperature_C', REFERENCE_TEMPERATURE_C, {
+    label: 'Temperature',
+    unit: '°C',
+  });
   const inUnit = toSi(stated.value, stated.unit);
   const isInKg = unitKind.startsWith('water');
   const molar = isInKg ? inUnit / WATER_MOLAR_MASS : inUnit;
@@ -95,7 +108,11 @@ function suitableKind(stated: StatedGas, gas: StatedGas['gas'], layerKind: State
     kind = kindOf(stated.unit);
   } catch (error) {
     if (!(error instanceof UnitError)) throw error;
-    throw new InputError('unit', stated.unit, `"${stated.unit}" is not a unit known here; use one of ${suitable.join(' or ')}.`);
+    throw new InputError(
+      'unit',
+      stated.unit,
+      `"${stated.unit}" is not a unit known here; use one of ${suitable.join(' or ')}.`,
+    );
   }
   if (!suitable.includes(kind)) {
     throw new InputError(
@@ -114,7 +131,10 @@ function drivingPressure(stated: StatedGas, unitKind: QuantityKind): number {
     const fraction = readNumber(stated.gas_mole_fraction_dry, 'gas_mole_fraction_dry', OXYGEN_FRACTION, {
       label: 'Oxygen in the dry test gas (1 for pure oxygen, 0.2095 for air)',
     });
-    return fraction * (ATMOSPHERE_PA - readHumidity(stated.relative_humidity ?? 0, 'relative_humidity') * saturationPa);
+    return (
+      fraction *
+      (ATMOSPHERE_PA - readHumidity(stated.relative_humidity ?? 0, 'relative_humidity') * saturationPa)
+    );
   }
   if (!isWaterRate(unitKind)) return 1;
   const saturationPa = saturationPressureAtK(readTemperatureK(stated.temperature_C, 'temperature_C'));
@@ -126,17 +146,26 @@ const isWaterRate = (kind: QuantityKind): boolean =>
   kind === 'water vapour transmission rate' || kind === 'water vapour transmission rate times thickness';
 
 function testHumidities(stated: StatedGas): { high: number; low: number } {
-  const high = readHumidity(stated.relative_humidity_high, 'relative_humidity_high', 'Humidity of the moist side');
+  const high = readHumidity(
+    stated.relative_humidity_high,
+    'relative_humidity_high',
+    'Humidity of the moist side',
+  );
   const low = readHumidity(stated.relative_humidity_low, 'relative_humidity_low', 'Humidity of the dry side');
   if (!(high > low)) {
-    throw new InputError('relative_humidity_low', low, 'The dry side must be drier than the moist side; exchange them.');
+    throw new InputError(
+      'relative_humidity_low',
+      low,
+      'The dry side must be drier than the moist side; exchange them.',
+    );
   }
   return { high, low };
 }
 
 function referenceHumidity(stated: StatedGas, unitKind: QuantityKind): number | undefined {
   const curve = readCurve(stated.humidity_curve, 'humidity_curve', 0);
-  if (stated.relative_humidity !== undefined) return readHumidity(stated.relative_humidity, 'relative_humidity');
+  if (stated.relative_humidity !== undefined)
+    return readHumidity(stated.relative_humidity, 'relative_humidity');
   if (!curve || !isWaterRate(unitKind)) return undefined;
   const { high, low } = testHumidities(stated);
   return humidityOfMean(curve, low, high);

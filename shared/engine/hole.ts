@@ -15,7 +15,12 @@ export function diffusivityInAir(at20C: number, temperatureK: number): number {
 }
 
 /** Resistance of a hole's own length of air [s·Pa/mol]: ℓRT/(D π r²). */
-export function holeResistance(lengthM: number, radiusM: number, diffusivity: number, temperatureK: number): number {
+export function holeResistance(
+  lengthM: number,
+  radiusM: number,
+  diffusivity: number,
+  temperatureK: number,
+): number {
   return (lengthM * GAS_CONSTANT * temperatureK) / (diffusivity * Math.PI * radiusM * radiusM);
 }
 
@@ -29,7 +34,11 @@ export function bareSideResistance(radiusM: number, diffusivity: number, tempera
  * Within ±7.6 % of the exact solution for one hole, L/r 0.02 to 1000; an estimate.
  * Source: Prins & Hermans, J. Phys. Chem. 63 (1959) 716.
  */
-export function coveredSideResistance(coverResistance: number, coverThicknessM: number, radiusM: number): number {
+export function coveredSideResistance(
+  coverResistance: number,
+  coverThicknessM: number,
+  radiusM: number,
+): number {
   return coverResistance / (Math.PI * radiusM * radiusM * (1 + (SPREADING * coverThicknessM) / radiusM));
 }
 
@@ -45,6 +54,7 @@ export function channelConductance(
   if (count === 0) return 0;
   const section = (Math.PI * diameterM * diameterM) / 4;
   return (
-    ((count * diffusivity) / (GAS_CONSTANT * temperatureK)) * (section / (lengthM + (Math.PI * diameterM) / 4))
+    ((count * diffusivity) / (GAS_CONSTANT * temperatureK)) *
+    (section / (lengthM + (Math.PI * diameterM) / 4))
   );
 }

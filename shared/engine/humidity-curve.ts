@@ -40,7 +40,11 @@ export class HumidityCurve {
   }
 
   /** A curve from stated points, scaled so that f = 1 at the reference humidity. */
-  static fromPoints(humidity: readonly number[], factor: readonly number[], referenceHumidity: number): HumidityCurve {
+  static fromPoints(
+    humidity: readonly number[],
+    factor: readonly number[],
+    referenceHumidity: number,
+  ): HumidityCurve {
     const logs = factor.map(Math.log);
     const atReference = interpolate(humidity, logs, referenceHumidity);
     return new HumidityCurve(
@@ -53,9 +57,7 @@ export class HumidityCurve {
   static quotient(a: HumidityCurve | null, b: HumidityCurve | null): HumidityCurve {
     const knots = [...(a ? a.humidity : []), ...(b ? b.humidity : [])].sort((x, y) => x - y);
     const distinct = knots.filter((knot, index) => index === 0 || knot !== knots[index - 1]);
-    const logs = distinct.map(
-      (knot) => (a ? Math.log(a.at(knot)) : 0) - (b ? Math.log(b.at(knot)) : 0),
-    );
+    const logs = distinct.map((knot) => (a ? Math.log(a.at(knot)) : 0) - (b ? Math.log(b.at(knot)) : 0));
     return new HumidityCurve(distinct, logs);
   }
 
@@ -75,7 +77,9 @@ export class HumidityCurve {
   private inSegment(segment: number, h: number): number {
     if (segment < 0) return this.factor[0];
     const slope = this.slope[segment];
-    return slope === 0 ? this.factor[segment] : this.factor[segment] * Math.exp(slope * (h - this.humidity[segment]));
+    return slope === 0
+      ? this.factor[segment]
+      : this.factor[segment] * Math.exp(slope * (h - this.humidity[segment]));
   }
 
   /** f(h) [-]. */
@@ -131,7 +135,7 @@ export class HumidityCurve {
       const slope = segment < 0 ? 0 : this.slope[segment];
       const toNext = own * factor * toKnot * meanExponential(slope * toKnot) + parallel * toKnot;
       if (left <= toNext) {
-        const step = Math.min(toKnot, riseWithin(own, parallel, factor, slope, left));
+        const step = riseWithin({ own, parallel, factor, slope, toKnot }, left);
         const end = parallel === 0 ? factor + (slope * left) / own : 0;
         ends.endFactor = end > 1e-3 * factor ? end : factor * Math.exp(slope * step);
         return rise + step;
@@ -147,18 +151,28 @@ export class HumidityCurve {
   }
 }
 
-function riseWithin(own: number, parallel: number, factor: number, slope: number, flux: number): number {
+interface Segment {
+  own: number;
+  parallel: number;
+  /** f at its start, and d ln f / dh. */
+  factor: number;
+  slope: number;
+  toKnot: number;
+}
+
+/** The rise within one segment; the flux is known not to need more than the segment. */
+function riseWithin({ own, parallel, factor, slope, toKnot }: Segment, flux: number): number {
   if (parallel === 0) {
     const flat = flux / (own * factor);
     const x = slope * flat;
-    if (Math.abs(x) < 1e-5) return flat * (1 - x * (0.5 - x * (1 / 3)));
-    return x <= -1 ? Infinity : Math.log1p(x) / slope;
+    if (Math.abs(x) < 1e-5) return Math.min(toKnot, flat * (1 - x * (0.5 - x * (1 / 3))));
+    return x <= -1 ? toKnot : Math.min(toKnot, Math.log1p(x) / slope);
   }
-  let step = flux / (own * factor + parallel);
+  let step = Math.min(toKnot, flux / (own * factor + parallel));
   for (let iteration = 0; iteration < 200; iteration++) {
     const value = own * factor * step * meanExponential(slope * step) + parallel * step;
     const correction = (value - flux) / (own * factor * Math.exp(slope * step) + parallel);
-    step -= correction;
+    step = Math.min(toKnot, step - correction);
     if (Math.abs(correction) <= 4e-16 * Math.abs(step)) break;
   }
   return step;

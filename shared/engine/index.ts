@@ -12,7 +12,12 @@ export { rateToPermeance, type TransmissionRate, type PermeanceFromRate } from '
 export { gasFromStated, type StatedGas } from './gas-from-stated';
 export { packConductance, type PackConductance, type PackConditions } from './pack-conductance';
 export { pouchArea, type PouchDescription, type PouchArea } from './pouch';
-export { pinhole, type PinholeDescription, type PinholeAnswer, type CoverDescription } from './pinhole-answer';
+export {
+  pinhole,
+  type PinholeDescription,
+  type PinholeAnswer,
+  type CoverDescription,
+} from './pinhole-answer';
 export { isothermMoisture, isothermActivity } from './isotherm-answer';
 export { storage } from './storage-answer';
 export { evaluate } from './evaluate';

@@ -25,6 +25,8 @@ export function isothermMoisture(isotherm: IsothermDescription, waterActivity: n
 export function isothermActivity(isotherm: IsothermDescription, moisture: number[]): number[] {
   const read = readIsotherm(isotherm, 'isotherm');
   return moisture.map((value, i) =>
-    read.activity(readNumber(value, `moisture_g_per_g[${i}]`, MOISTURE_G_PER_G, { label: 'Moisture', unit: 'g/g' })),
+    read.activity(
+      readNumber(value, `moisture_g_per_g[${i}]`, MOISTURE_G_PER_G, { label: 'Moisture', unit: 'g/g' }),
+    ),
   );
 }

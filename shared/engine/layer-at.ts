@@ -51,5 +51,8 @@ export function layerAt(
       humidity_warning: gas.curve?.isBeyond(humidity) ?? false,
     };
   };
-  return { oxygen: gasAt(read.oxygen, alone.oxygenPermeance), water: gasAt(read.water, alone.waterPermeance) };
+  return {
+    oxygen: gasAt(read.oxygen, alone.oxygenPermeance),
+    water: gasAt(read.water, alone.waterPermeance),
+  };
 }

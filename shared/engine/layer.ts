@@ -34,7 +34,9 @@ export interface Layer {
 /** A layer with what follows from its two gases. */
 export function layerOf(layer: Omit<Layer, 'waterOverOxygen'>): Layer {
   const oxygenCurve = layer.oxygen?.curve ?? null;
-  const waterOverOxygen = oxygenCurve ? HumidityCurve.quotient(layer.water?.curve ?? null, oxygenCurve) : null;
+  const waterOverOxygen = oxygenCurve
+    ? HumidityCurve.quotient(layer.water?.curve ?? null, oxygenCurve)
+    : null;
   return { ...layer, waterOverOxygen };
 }
 

@@ -8,8 +8,10 @@ const ROUNDING_K = 1e-9;
 
 /** True more than 15 K outside a known measured range; false where none is known. */
 export function isBeyondMeasured(gas: GasInLayer, temperatureK: number): boolean {
-  const isBelow = gas.measuredMinK !== null && temperatureK < gas.measuredMinK - TRUSTED_BEYOND_K - ROUNDING_K;
-  const isAbove = gas.measuredMaxK !== null && temperatureK > gas.measuredMaxK + TRUSTED_BEYOND_K + ROUNDING_K;
+  const isBelow =
+    gas.measuredMinK !== null && temperatureK < gas.measuredMinK - TRUSTED_BEYOND_K - ROUNDING_K;
+  const isAbove =
+    gas.measuredMaxK !== null && temperatureK > gas.measuredMaxK + TRUSTED_BEYOND_K + ROUNDING_K;
   return isBelow || isAbove;
 }
 

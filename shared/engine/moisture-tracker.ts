@@ -19,7 +19,8 @@ export class MoistureTracker {
     this.report = new Float64Array(system.reportS.length);
     if (this.max !== undefined && this.moisture >= this.max) this.maxReachedAtS = 0;
     if (this.min !== undefined && this.moisture <= this.min) this.minReachedAtS = 0;
-    while (this.nextReport < this.reportS.length && this.reportS[this.nextReport] <= 0) this.write(this.moisture);
+    while (this.nextReport < this.reportS.length && this.reportS[this.nextReport] <= 0)
+      this.write(this.moisture);
   }
 
   /**
@@ -45,7 +46,8 @@ export class MoistureTracker {
 
   /** Stands still until `untilS`. */
   rest(untilS: number): void {
-    while (this.nextReport < this.reportS.length && this.reportS[this.nextReport] <= untilS) this.write(this.moisture);
+    while (this.nextReport < this.reportS.length && this.reportS[this.nextReport] <= untilS)
+      this.write(this.moisture);
   }
 
   finish(): void {

@@ -97,7 +97,8 @@ export class OxygenStore {
   beginLeg(conditions: LegConditions, atS: number): void {
     this.conditions = conditions;
     this.noteHeadspace(atS);
-    if (atS === 0) while (this.reportIsDue(0)) this.writeReport(this.headspaceMol, this.uptakeMol, this.absorberMol);
+    if (atS === 0)
+      while (this.reportIsDue(0)) this.writeReport(this.headspaceMol, this.uptakeMol, this.absorberMol);
   }
 
   /** Whatever is still to be reported holds the present values. */
@@ -140,7 +141,11 @@ export class OxygenStore {
     const after = (seconds: number): { headspaceMol: number; uptakeMol: number } =>
       this.afterConstant(conductance, headspace, uptake, seconds);
     const end = after(duration);
-    if (this.uptakeLimit !== undefined && this.uptakeReachedAtS === null && end.uptakeMol >= this.uptakeLimit) {
+    if (
+      this.uptakeLimit !== undefined &&
+      this.uptakeReachedAtS === null &&
+      end.uptakeMol >= this.uptakeLimit
+    ) {
       this.uptakeReachedAtS = from + crossing((s) => after(s).uptakeMol, this.uptakeLimit, duration);
     }
     const limitMol = this.headspaceLimitMol();
@@ -197,7 +202,8 @@ export class OxygenStore {
       let largest = 0;
       for (let k = 0; k < COUNT; k++) largest = Math.max(largest, Math.abs(this.content[k]));
       contentError = largest > 0 ? openEnd(this.contentCoefficients) / (tolerance * largest) : 0;
-      for (let k = 0; k < COUNT; k++) this.flow[k] = step.pace[k] * reactionSi * pressurePerMol * this.content[k];
+      for (let k = 0; k < COUNT; k++)
+        this.flow[k] = step.pace[k] * reactionSi * pressurePerMol * this.content[k];
     } else if (isReacting) {
       for (let k = 0; k < COUNT; k++) {
         const conductance = step.oxygen[k];
@@ -218,7 +224,10 @@ export class OxygenStore {
   regimeEnd(x: number): number {
     this.isUsedUpInStep = this.isAbsorbing && this.passedAt(x) >= this.absorberMol;
     if (!this.isUsedUpInStep) return x;
-    return Math.min(x, whereReaches((at) => this.passedAt(at), this.absorberMol));
+    return Math.min(
+      x,
+      whereReaches((at) => this.passedAt(at), this.absorberMol),
+    );
   }
 
   /** Takes the prepared step up to x; `fromS` is when it began. */
@@ -226,7 +235,11 @@ export class OxygenStore {
     const untilS = fromS + step.timeAt(x);
     if (this.isAbsorbing) {
       while (this.reportIsDue(untilS)) {
-        this.writeReport(0, this.uptakeMol, Math.max(0, this.absorberMol - this.passedAt(this.reportX(step, fromS))));
+        this.writeReport(
+          0,
+          this.uptakeMol,
+          Math.max(0, this.absorberMol - this.passedAt(this.reportX(step, fromS))),
+        );
       }
       const passed = this.passedAt(x);
       this.passedMol += passed;
@@ -240,7 +253,8 @@ export class OxygenStore {
     const takes = this.mode !== 'none';
     const uptakeAt = (at: number): number => (takes ? this.uptakeMol + this.passedAt(at) : this.uptakeMol);
     if (this.uptakeLimit !== undefined && this.uptakeReachedAtS === null && uptakeAt(x) >= this.uptakeLimit) {
-      this.uptakeReachedAtS = fromS + step.timeAt(whereReaches((at) => uptakeAt(at * x), this.uptakeLimit) * x);
+      this.uptakeReachedAtS =
+        fromS + step.timeAt(whereReaches((at) => uptakeAt(at * x), this.uptakeLimit) * x);
     }
     const limitMol = this.headspaceLimitMol();
     if (limitMol !== null && this.headspaceReachedAtS === null) {
@@ -264,7 +278,8 @@ export class OxygenStore {
   /** Headspace oxygen [mol] within the prepared step. */
   private contentAt(x: number): number {
     if (!this.hasHeadspace || this.mode === 'at_once') return 0;
-    if (this.mode === 'rate') return x === 0 ? this.headspaceMol : Math.max(0, valueAt(this.contentCoefficients, x));
+    if (this.mode === 'rate')
+      return x === 0 ? this.headspaceMol : Math.max(0, valueAt(this.contentCoefficients, x));
     const { outsideOxygenPa, pressurePerMol } = this.inLeg();
     const balance = outsideOxygenPa / pressurePerMol;
     const exponent = (pressurePerMol * this.passedAt(x)) / outsideOxygenPa;

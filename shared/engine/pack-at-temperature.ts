@@ -53,8 +53,16 @@ export class PackAtTemperature {
     this.seal = pack.seal ? new WallAtTemperature([pack.seal.film], temperatureK) : null;
     this.sealAreaM2 = pack.seal ? pack.seal.areaM2 : 0;
     const leaks = pack.leaks ?? { count: 0, lengthM: 1, diameterM: 1 };
-    this.leaksOxygen = channelConductance(leaks, diffusivityInAir(OXYGEN_IN_AIR_20C, temperatureK), temperatureK);
-    this.leaksWater = channelConductance(leaks, diffusivityInAir(WATER_IN_AIR_20C, temperatureK), temperatureK);
+    this.leaksOxygen = channelConductance(
+      leaks,
+      diffusivityInAir(OXYGEN_IN_AIR_20C, temperatureK),
+      temperatureK,
+    );
+    this.leaksWater = channelConductance(
+      leaks,
+      diffusivityInAir(WATER_IN_AIR_20C, temperatureK),
+      temperatureK,
+    );
     const all = this.seal ? [...this.walls, this.seal] : this.walls;
     this.isWaterHumid = all.some((wall) => wall.isWaterHumid);
     this.isOxygenHumid = all.some((wall) => wall.isOxygenHumid);

@@ -1,5 +1,11 @@
 import { readTemperatureK } from './description/read-conditions';
-import { COATING_THICKNESS_UM, DEFECT_DENSITY_PER_M2, HOLE_DIAMETER_UM, PERMEABILITY_SI, THICKNESS_UM } from './description/ranges';
+import {
+  COATING_THICKNESS_UM,
+  DEFECT_DENSITY_PER_M2,
+  HOLE_DIAMETER_UM,
+  PERMEABILITY_SI,
+  THICKNESS_UM,
+} from './description/ranges';
 import { readChoice, readNumber, readObject, readOptional } from './description/read-number';
 import {
   bareSideResistance,
@@ -46,7 +52,10 @@ export function pinhole(description: PinholeDescription): PinholeAnswer {
   const temperatureK = readTemperatureK(description.temperature_C, 'temperature_C');
   const radiusM =
     0.5e-6 *
-    readNumber(description.hole_diameter_um, 'hole_diameter_um', HOLE_DIAMETER_UM, { label: 'Diameter', unit: 'µm' });
+    readNumber(description.hole_diameter_um, 'hole_diameter_um', HOLE_DIAMETER_UM, {
+      label: 'Diameter',
+      unit: 'µm',
+    });
   const metalM =
     1e-6 *
     readOptional(description.metal_thickness_um, 'metal_thickness_um', COATING_THICKNESS_UM, {
@@ -63,7 +72,11 @@ export function pinhole(description: PinholeDescription): PinholeAnswer {
     if (value === undefined || value === null) return bareSideResistance(radiusM, diffusivity, temperatureK);
     const cover = readObject<CoverDescription>(value, path, 'Cover');
     const thicknessM =
-      1e-6 * readNumber(cover.thickness_um, `${path}.thickness_um`, THICKNESS_UM, { label: 'Thickness', unit: 'µm' });
+      1e-6 *
+      readNumber(cover.thickness_um, `${path}.thickness_um`, THICKNESS_UM, {
+        label: 'Thickness',
+        unit: 'µm',
+      });
     const permeability = readNumber(
       cover.permeability_mol_m_per_m2_s_Pa,
       `${path}.permeability_mol_m_per_m2_s_Pa`,

@@ -40,10 +40,18 @@ export function pouchArea(pouch: PouchDescription): PouchArea {
   const openWidth = width - left - right;
   const openHeight = height - top - bottom;
   if (!(openWidth > 0)) {
-    throw new InputError('width_mm', width, 'The side seals leave no open width; widen the pouch or narrow the seals.');
+    throw new InputError(
+      'width_mm',
+      width,
+      'The side seals leave no open width; widen the pouch or narrow the seals.',
+    );
   }
   if (!(openHeight > 0)) {
-    throw new InputError('height_mm', height, 'The seals leave no open height; lengthen the pouch or narrow the seals.');
+    throw new InputError(
+      'height_mm',
+      height,
+      'The seals leave no open height; lengthen the pouch or narrow the seals.',
+    );
   }
   const seals: [number, number][] = [
     [left, openHeight],

@@ -55,7 +55,8 @@ export function rateToPermeance(rate: TransmissionRate): PermeanceFromRate {
       unit: 'Pa',
       otherwise: ATMOSPHERE_PA,
     });
-    const difference = fraction * (total - readHumidity(rate.relative_humidity, 'relative_humidity') * saturationPa);
+    const difference =
+      fraction * (total - readHumidity(rate.relative_humidity, 'relative_humidity') * saturationPa);
     return { permeance_mol_per_m2_s_Pa: molar / difference, pressure_difference_Pa: difference };
   }
   if (rate.gas !== 'water') throw new InputError('gas', gas, 'Use oxygen or water.');
@@ -68,7 +69,11 @@ export function rateToPermeance(rate: TransmissionRate): PermeanceFromRate {
   const high = readHumidity(rate.relative_humidity_high, 'relative_humidity_high');
   const low = readHumidity(rate.relative_humidity_low, 'relative_humidity_low');
   if (!(high > low)) {
-    throw new InputError('relative_humidity_low', low, 'The dry side must be drier than the moist side; exchange them.');
+    throw new InputError(
+      'relative_humidity_low',
+      low,
+      'The dry side must be drier than the moist side; exchange them.',
+    );
   }
   const difference = (high - low) * saturationPa;
   return { permeance_mol_per_m2_s_Pa: molar / difference, pressure_difference_Pa: difference };

@@ -18,7 +18,11 @@ export function storage(description: StorageDescription): StorageAnswer {
 }
 
 /** The answer of a run, in the units of the description. */
-export function answerOf(description: StorageDescription, system: StorageSystem, run: StorageRun): StorageAnswer {
+export function answerOf(
+  description: StorageDescription,
+  system: StorageSystem,
+  run: StorageRun,
+): StorageAnswer {
   const limits: StorageAnswer['limits'] = {};
   let first: LimitName | null = null;
   let firstDays = Infinity;
@@ -63,7 +67,8 @@ function reachedAt(run: StorageRun): Record<LimitName, number | null> {
 
 function valueNow(name: LimitName, system: StorageSystem, run: StorageRun): number {
   if (name === 'oxygen_uptake_mg_per_kg') return uptakeMgPerKg(run.oxygen.uptakeMol, system.food.massKg);
-  if (name === 'headspace_oxygen_percent') return (100 * run.oxygen.headspacePressure()) / system.totalPressurePa;
+  if (name === 'headspace_oxygen_percent')
+    return (100 * run.oxygen.headspacePressure()) / system.totalPressurePa;
   return run.moisture.moisture;
 }
 
@@ -81,7 +86,9 @@ function coursesOf(description: StorageDescription, system: StorageSystem, run: 
     oxygen_uptake_mg_per_kg: place.map((i) => uptakeMgPerKg(report.uptakeMol[i], system.food.massKg)),
   };
   if (system.pack.headspaceM3 > 0) {
-    courses.headspace_oxygen_percent = place.map((i) => (100 * report.headspacePa[i]) / system.totalPressurePa);
+    courses.headspace_oxygen_percent = place.map(
+      (i) => (100 * report.headspacePa[i]) / system.totalPressurePa,
+    );
   }
   if (system.food.isotherm) courses.moisture_g_per_g = place.map((i) => run.moisture.report[i]);
   if (system.absorberMol > 0) {

@@ -11,7 +11,9 @@ const STEP_TOLERANCE = 1e-8;
 export const RELATIVE_TOLERANCE = 1e-6;
 /** Closer than this to the air outside, the food counts as at rest with it. */
 const AT_REST = 1e-12;
-const MOST_STEPS = 400_000;
+/** Work that one answer may cost: conductances of the pack, and layers in them. Some seconds; then the run says so. */
+const MOST_EVALUATIONS = 1_000_000;
+const MOST_LAYER_EVALUATIONS = 15_000_000;
 
 export interface LegStart {
   leg: number;
@@ -67,6 +69,7 @@ class Runner {
   private readonly step = new MarchStep();
   private readonly legStarts: LegStart[] = [];
   private readonly dryMassKg: number;
+  private readonly mostEvaluations: number;
   private timeS = 0;
   private lastLeg = 0;
 
@@ -77,6 +80,8 @@ class Runner {
     this.conditions = conditionsOf(system);
     this.oxygen = new OxygenStore(system, this.conditions[0]);
     this.moisture = new MoistureTracker(system);
+    const layers = system.pack.walls.reduce((sum, wall) => sum + wall.layers.length, 0);
+    this.mostEvaluations = Math.min(MOST_EVALUATIONS, MOST_LAYER_EVALUATIONS / layers);
     this.dryMassKg = system.food.massKg / (1 + system.food.initialMoisture);
   }
 
@@ -161,9 +166,11 @@ class Runner {
       return;
     }
     const held = isotherm.moisture(inside);
-    const isPinned = inside === 0 ? this.moisture.moisture < held : inside === 1 && this.moisture.moisture > held;
+    const isPinned =
+      inside === 0 ? this.moisture.moisture < held : inside === 1 && this.moisture.moisture > held;
     if (isPinned) this.slide(conditions, inside, held, endS);
-    else if (isotherm.isLinear && !pack.isWaterHumid && !pack.isOxygenHumid) this.decay(conditions, distance, endS);
+    else if (isotherm.isLinear && !pack.isWaterHumid && !pack.isOxygenHumid)
+      this.decay(conditions, distance, endS);
     else this.march(conditions, distance, endS);
   }
 
@@ -203,7 +210,8 @@ class Runner {
     const start = this.moisture.moisture;
     const slope = isotherm.slope(0);
     const lifetimeS = (this.dryMassKg * slope) / (WATER_MOLAR_MASS * pack.water * saturationPa);
-    const moistureAt = (atS: number): number => start - slope * distance * Math.expm1(-(atS - startS) / lifetimeS);
+    const moistureAt = (atS: number): number =>
+      start - slope * distance * Math.expm1(-(atS - startS) / lifetimeS);
     this.oxygen.advanceConstant(pack.oxygen, startS, endS - startS);
     this.moisture.advance(moistureAt(endS), endS, {
       whenAt: (moisture) => startS - lifetimeS * Math.log1p(-(moisture - start) / (slope * distance)),
@@ -221,7 +229,7 @@ class Runner {
     let firstOxygen = pack.oxygen;
     let width = Math.min(1, (1.05 * (endS - this.timeS)) / firstPace);
     while (this.timeS < endS && Math.abs(step.startDistance) > AT_REST) {
-      if (counters.acceptedSteps + counters.rejectedSteps >= MOST_STEPS) {
+      if (counters.rateEvaluations >= this.mostEvaluations) {
         counters.isStepLimitReached = true;
         return;
       }
@@ -294,7 +302,8 @@ class Runner {
         const at = Math.log(step.startDistance / distance) / step.width;
         return startS + step.timeAt(at > 0 ? Math.min(at, x) : 0);
       },
-      moistureAt: (atS) => moistureOf(step.distanceAt(whereReaches((part) => step.timeAt(part * x), atS - startS) * x)),
+      moistureAt: (atS) =>
+        moistureOf(step.distanceAt(whereReaches((part) => step.timeAt(part * x), atS - startS) * x)),
     });
     this.timeS = untilS;
   }

@@ -98,12 +98,15 @@ export class WallAtTemperature {
     this.hasWaterCurve = this.waterCurves.some((curve) => curve !== null);
     this.pierced = layers.flatMap((layer, i) => (layer.defects ? [pierce(layers, i, temperatureK)] : []));
     const coverOf = (curves: (HumidityCurve | null)[]): boolean =>
-      this.pierced.some((hole) => [...hole.outsideCover, ...hole.insideCover].some((i) => curves[i] !== null));
+      this.pierced.some((hole) =>
+        [...hole.outsideCover, ...hole.insideCover].some((i) => curves[i] !== null),
+      );
     const isWaterCovered = coverOf(this.waterCurves);
     const isOxygenCovered = coverOf(this.oxygenCurves);
     this.doCoversFeelHumidity = isWaterCovered || isOxygenCovered;
     this.isWaterHumid = !this.isTight && (this.hasWaterCurve || isWaterCovered);
-    this.isOxygenHumid = !this.isTight && (isOxygenCovered || this.oxygenCurves.some((curve) => curve !== null));
+    this.isOxygenHumid =
+      !this.isTight && (isOxygenCovered || this.oxygenCurves.some((curve) => curve !== null));
     this.updateHoles(0, 0);
   }
 

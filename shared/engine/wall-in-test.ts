@@ -31,14 +31,28 @@ export function readTest(value: unknown, path: string): TestConditions {
   if (test.gas === 'oxygen') {
     const humidityOutside = readHumidity(test.relative_humidity_outside, `${path}.relative_humidity_outside`);
     const humidityInside = readHumidity(test.relative_humidity_inside, `${path}.relative_humidity_inside`);
-    const fraction = readNumber(test.oxygen_mole_fraction_dry, `${path}.oxygen_mole_fraction_dry`, OXYGEN_FRACTION, {
-      label: 'Oxygen in the dry test gas',
-    });
-    const oxygenOutsidePa = fraction * (ATMOSPHERE_PA - humidityOutside * saturationPressureAtK(temperatureK));
+    const fraction = readNumber(
+      test.oxygen_mole_fraction_dry,
+      `${path}.oxygen_mole_fraction_dry`,
+      OXYGEN_FRACTION,
+      {
+        label: 'Oxygen in the dry test gas',
+      },
+    );
+    const oxygenOutsidePa =
+      fraction * (ATMOSPHERE_PA - humidityOutside * saturationPressureAtK(temperatureK));
     return { gas, temperatureK, humidityOutside, humidityInside, oxygenOutsidePa };
   }
-  const high = readHumidity(test.relative_humidity_high, `${path}.relative_humidity_high`, 'Humidity of the moist side');
-  const low = readHumidity(test.relative_humidity_low, `${path}.relative_humidity_low`, 'Humidity of the dry side');
+  const high = readHumidity(
+    test.relative_humidity_high,
+    `${path}.relative_humidity_high`,
+    'Humidity of the moist side',
+  );
+  const low = readHumidity(
+    test.relative_humidity_low,
+    `${path}.relative_humidity_low`,
+    'Humidity of the dry side',
+  );
   if (!(high > low)) {
     throw new InputError(
       `${path}.relative_humidity_low`,
@@ -90,4 +104,5 @@ export function wallInTest(layers: LayerDescription[], test: TransmissionTest): 
 }
 
 /** Temperature of a test in °C, as written. */
-export const testTemperatureC = (conditions: TestConditions): number => conditions.temperatureK - ZERO_CELSIUS_K;
+export const testTemperatureC = (conditions: TestConditions): number =>
+  conditions.temperatureK - ZERO_CELSIUS_K;

@@ -34,7 +34,12 @@ export function wallState(layers: LayerDescription[], conditions: WallConditions
       OXYGEN_PRESSURE,
       label,
     ),
-    oxygenInsidePa: readNumber(conditions.oxygen_pressure_inside_Pa, 'oxygen_pressure_inside_Pa', OXYGEN_PRESSURE, label),
+    oxygenInsidePa: readNumber(
+      conditions.oxygen_pressure_inside_Pa,
+      'oxygen_pressure_inside_Pa',
+      OXYGEN_PRESSURE,
+      label,
+    ),
   });
   return { ...state, temperature_C: conditions.temperature_C };
 }

@@ -18,7 +18,9 @@ export function saturationPressureAtK(temperatureK: number): number {
   if (temperatureK < TRIPLE_POINT_K) {
     const theta = temperatureK / TRIPLE_POINT_K;
     const sum =
-      -21.2144006 * theta ** 0.00333333333 + 27.3203819 * theta ** 1.20666667 - 6.1059813 * theta ** 1.70333333;
+      -21.2144006 * theta ** 0.00333333333 +
+      27.3203819 * theta ** 1.20666667 -
+      6.1059813 * theta ** 1.70333333;
     return TRIPLE_POINT_PA * Math.exp(sum / theta);
   }
   const tau = 1 - temperatureK / CRITICAL_TEMPERATURE_K;

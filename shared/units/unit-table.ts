@@ -1,4 +1,11 @@
-import { ATMOSPHERE_PA, DAY_S, MOL_PER_CM3_STP, OXYGEN_MOLAR_MASS, WATER_MOLAR_MASS, ZERO_CELSIUS_K } from './constants';
+import {
+  ATMOSPHERE_PA,
+  DAY_S,
+  MOL_PER_CM3_STP,
+  OXYGEN_MOLAR_MASS,
+  WATER_MOLAR_MASS,
+  ZERO_CELSIUS_K,
+} from './constants';
 
 /** What a unit measures. Values convert within a kind and never between kinds. */
 export type QuantityKind =
@@ -43,7 +50,11 @@ const BAR_PA = 1e5;
 const perm = (mercuryDensity: number): number =>
   GRAIN_KG / (3600 * FOOT_M * FOOT_M * mercuryDensity * GRAVITY * INCH_M);
 
-const BARRER = (1e-10 * MOL_PER_CM3_STP * 1e-2) / (1e-4 * 10 * MM_HG_PA);
+/**
+ * 1e-10 cm³(STP)·cm/(cm²·s·cmHg) with 76 cmHg to the atmosphere, so that 1 barrer is 65 664 cm³·µm/(m²·day·atm) exactly.
+ * Mercury's density at 0 °C would make it smaller by 1.4e-7.
+ */
+const BARRER = (1e-10 * MOL_PER_CM3_STP * 1e-2) / (1e-4 * (ATMOSPHERE_PA / 76));
 
 /** SI behind each kind: mol·m/(m²·s·Pa), mol/(m²·s·Pa), mol/(m²·s), kg/(m²·s), kg·m/(m²·s), kg/(m²·s·Pa), kg·m/(m²·s·Pa). */
 const gasPermeability = (factorToSi: number): Unit => ({ kind: 'gas permeability', factorToSi });

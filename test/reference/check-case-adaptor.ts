@@ -37,9 +37,7 @@ export interface Mismatch {
 }
 
 export type CaseOutcome =
-  | { status: 'passed' }
-  | { status: 'failed'; mismatches: Mismatch[] }
-  | { status: 'skipped'; reason: string };
+  { status: 'passed' } | { status: 'failed'; mismatches: Mismatch[] } | { status: 'skipped'; reason: string };
 
 type Calculation = (input: CheckCase['input']) => unknown;
 
@@ -66,7 +64,9 @@ const CALCULATIONS: Record<string, Calculation> = {
   }),
   rate_to_permeance: (input) => rateToPermeance(as(withoutName(input))),
   saturation: (input) => ({
-    pressure_Pa: numbers(input.temperature_C, 'temperature_C').map((temperature) => saturationPressurePa(temperature)),
+    pressure_Pa: numbers(input.temperature_C, 'temperature_C').map((temperature) =>
+      saturationPressurePa(temperature),
+    ),
   }),
   layer: (input) => layerAt(as(input.layer), as(withoutName(input))),
   laminate: (input) => wallState(as(input.layers), as(withoutName(input))),
@@ -85,7 +85,9 @@ const FIRST_SECTION_TO_COME = 8;
 
 export function runCase(given: CheckCase, atolByKey: Record<string, number>): CaseOutcome {
   const name = given.input?.calculation;
-  const calculation = Object.prototype.hasOwnProperty.call(CALCULATIONS, name) ? CALCULATIONS[name] : undefined;
+  const calculation = Object.prototype.hasOwnProperty.call(CALCULATIONS, name)
+    ? CALCULATIONS[name]
+    : undefined;
   if (!calculation) {
     if (Number.parseFloat(String(given.section)) < FIRST_SECTION_TO_COME) {
       return failed('input.calculation', 'a known calculation', name);
@@ -98,7 +100,11 @@ export function runCase(given: CheckCase, atolByKey: Record<string, number>): Ca
     answer = calculation(given.input);
   } catch (error) {
     if (!(error instanceof InputError || error instanceof UnitError)) {
-      return failed('', given.expected, error instanceof Error ? `${error.name}: ${error.message}` : String(error));
+      return failed(
+        '',
+        given.expected,
+        error instanceof Error ? `${error.name}: ${error.message}` : String(error),
+      );
     }
     return expectsError ? { status: 'passed' } : failed('', given.expected, `refused: ${error.message}`);
   }

@@ -18,6 +18,8 @@ export const ACTIVATION_ENERGY_J_PER_MOL: NumericRange = { min: -300_000, max: 5
 /** Where a material was measured may lie outside what a route may have. */
 export const REFERENCE_TEMPERATURE_C: NumericRange = { min: -100, max: 200 };
 export const CURVE_FACTOR: NumericRange = { min: 1e-12, max: 1e12 };
+/** Least distance between two humidities of a curve: a step for all purposes, and still no rounding. */
+export const CURVE_SPACING = 1e-9;
 export const CURVE_POINTS: NumericRange = { min: 1, max: 200 };
 export const LAYER_COUNT: NumericRange = { min: 1, max: 50 };
 export const WALL_COUNT: NumericRange = { min: 1, max: 20 };

@@ -10,7 +10,10 @@ export function readIsotherm(value: unknown, path: string): Isotherm {
   const given = isotherm as unknown as Record<string, unknown>;
   if (type === 'linear') {
     return linearIsotherm(
-      readNumber(given.slope_g_per_g, `${path}.slope_g_per_g`, ISOTHERM_SLOPE, { label: 'Slope', unit: 'g/g' }),
+      readNumber(given.slope_g_per_g, `${path}.slope_g_per_g`, ISOTHERM_SLOPE, {
+        label: 'Slope',
+        unit: 'g/g',
+      }),
       readNumber(given.intercept_g_per_g, `${path}.intercept_g_per_g`, ISOTHERM_INTERCEPT, {
         label: 'Intercept',
         unit: 'g/g',
@@ -18,7 +21,10 @@ export function readIsotherm(value: unknown, path: string): Isotherm {
     );
   }
   return gabIsotherm(
-    readNumber(given.Xm_g_per_g, `${path}.Xm_g_per_g`, GAB_MONOLAYER, { label: 'Monolayer moisture', unit: 'g/g' }),
+    readNumber(given.Xm_g_per_g, `${path}.Xm_g_per_g`, GAB_MONOLAYER, {
+      label: 'Monolayer moisture',
+      unit: 'g/g',
+    }),
     readNumber(given.C, `${path}.C`, GAB_C, { label: 'C of the isotherm' }),
     readNumber(given.K, `${path}.K`, GAB_K, { label: 'K of the isotherm' }),
   );

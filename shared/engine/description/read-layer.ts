@@ -7,6 +7,7 @@ import {
   COATING_THICKNESS_UM,
   CURVE_FACTOR,
   CURVE_POINTS,
+  CURVE_SPACING,
   DEFECT_DENSITY_PER_M2,
   HOLE_DIAMETER_UM,
   HUMIDITY,
@@ -43,12 +44,19 @@ export function readLayer(value: unknown, path: string): Layer {
           unit: 'µm',
           otherwise: 0,
         })
-      : readNumber(layer.thickness_um, `${path}.thickness_um`, THICKNESS_UM, { label: 'Thickness', unit: 'µm' });
+      : readNumber(layer.thickness_um, `${path}.thickness_um`, THICKNESS_UM, {
+          label: 'Thickness',
+          unit: 'µm',
+        });
   const thicknessM = thicknessUm * 1e-6;
   const name = typeof layer.name === 'string' && layer.name !== '' ? layer.name : kind;
   const given = layer as { oxygen?: unknown; water?: unknown; defects?: unknown };
   if (kind === 'film' && given.defects !== undefined && given.defects !== null) {
-    throw new InputError(`${path}.defects`, given.defects, 'Only foils and coatings carry pinholes; leave them out here.');
+    throw new InputError(
+      `${path}.defects`,
+      given.defects,
+      'Only foils and coatings carry pinholes; leave them out here.',
+    );
   }
   const isFoil = kind === 'foil';
   return layerOf({
@@ -81,11 +89,16 @@ export function readGas(
         PERMEANCE_SI,
         { label: 'Permeance', unit: 'mol/(m²·s·Pa)' },
       );
-  const referenceC = readOptional(gas.reference_temperature_C, `${path}.reference_temperature_C`, REFERENCE_TEMPERATURE_C, {
-    label: 'Reference temperature',
-    unit: '°C',
-    otherwise: 23,
-  });
+  const referenceC = readOptional(
+    gas.reference_temperature_C,
+    `${path}.reference_temperature_C`,
+    REFERENCE_TEMPERATURE_C,
+    {
+      label: 'Reference temperature',
+      unit: '°C',
+      otherwise: 23,
+    },
+  );
   const referenceHumidity = readOptional(
     gas.reference_relative_humidity,
     `${path}.reference_relative_humidity`,
@@ -118,14 +131,22 @@ export function readGas(
 
 function readMeasured(value: unknown, path: string): number | null {
   if (value === undefined || value === null) return null;
-  return readNumber(value, path, REFERENCE_TEMPERATURE_C, { label: 'Measured temperature', unit: '°C' }) + ZERO_CELSIUS_K;
+  return (
+    readNumber(value, path, REFERENCE_TEMPERATURE_C, { label: 'Measured temperature', unit: '°C' }) +
+    ZERO_CELSIUS_K
+  );
 }
 
 /** A humidity curve scaled to 1 at the reference humidity; null where none is given. */
 export function readCurve(value: unknown, path: string, referenceHumidity: number): HumidityCurve | null {
   if (value === undefined || value === null) return null;
   const curve = readObject<HumidityCurveDescription>(value, path, 'Humidity curve');
-  const humidity = readList<number>(curve.relative_humidity, `${path}.relative_humidity`, CURVE_POINTS, 'Humidities');
+  const humidity = readList<number>(
+    curve.relative_humidity,
+    `${path}.relative_humidity`,
+    CURVE_POINTS,
+    'Humidities',
+  );
   const factor = readList<number>(curve.factor, `${path}.factor`, CURVE_POINTS, 'Factors');
   if (humidity.length !== factor.length) {
     throw new InputError(
@@ -137,11 +158,12 @@ export function readCurve(value: unknown, path: string, referenceHumidity: numbe
   humidity.forEach((point, k) => {
     readNumber(point, `${path}.relative_humidity[${k}]`, HUMIDITY, { label: 'Humidity of the curve' });
     readNumber(factor[k], `${path}.factor[${k}]`, CURVE_FACTOR, { label: 'Factor of the curve' });
-    if (k > 0 && !(point > humidity[k - 1])) {
+    if (k > 0 && !(point - humidity[k - 1] >= CURVE_SPACING * (1 - 1e-6))) {
       throw new InputError(
         `${path}.relative_humidity[${k}]`,
         point,
-        `Humidities of the curve must rise: ${point} follows ${humidity[k - 1]}. Put them in order, each once.`,
+        `Humidities of the curve must rise, by ${CURVE_SPACING} at least: ${point} follows ${humidity[k - 1]}. ` +
+          'Put them in order, each once.',
       );
     }
   });

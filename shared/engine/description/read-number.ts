@@ -28,7 +28,11 @@ export function readNumber(value: unknown, path: string, range: NumericRange, wo
   }
   const isAboveMin = range.isMinExcluded ? value > range.min : value >= range.min;
   if (!isAboveMin || value > range.max) {
-    throw new InputError(path, value, `${words.label} ${withUnit(value, words.unit)} does not fit; use ${use}.`);
+    throw new InputError(
+      path,
+      value,
+      `${words.label} ${withUnit(value, words.unit)} does not fit; use ${use}.`,
+    );
   }
   return value;
 }
@@ -47,10 +51,18 @@ export function readOptional(
 export function readList<Item>(value: unknown, path: string, range: NumericRange, label: string): Item[] {
   if (!Array.isArray(value)) throw new InputError(path, describe(value), `${label}: a list is needed.`);
   if (value.length < range.min) {
-    throw new InputError(path, value.length, `${label}: at least ${range.min} needed, ${value.length} given.`);
+    throw new InputError(
+      path,
+      value.length,
+      `${label}: at least ${range.min} needed, ${value.length} given.`,
+    );
   }
   if (value.length > range.max) {
-    throw new InputError(path, value.length, `${label}: at most ${range.max} allowed, ${value.length} given.`);
+    throw new InputError(
+      path,
+      value.length,
+      `${label}: at most ${range.max} allowed, ${value.length} given.`,
+    );
   }
   return value as Item[];
 }
@@ -72,7 +84,11 @@ export function readChoice<Choice extends string>(
 ): Choice {
   const found = choices.find((choice) => choice === value);
   if (found === undefined) {
-    throw new InputError(path, describe(value), `${label} "${String(value)}" is not known; use ${choices.join(', ')}.`);
+    throw new InputError(
+      path,
+      describe(value),
+      `${label} "${String(value)}" is not known; use ${choices.join(', ')}.`,
+    );
   }
   return found;
 }
@@ -80,6 +96,7 @@ export function readChoice<Choice extends string>(
 /** A value an error can carry: JSON has no undefined, functions or NaN. */
 function describe(value: unknown): unknown {
   if (value === undefined) return null;
-  if (typeof value === 'number' || typeof value === 'function' || typeof value === 'bigint') return String(value);
+  if (typeof value === 'number' || typeof value === 'function' || typeof value === 'bigint')
+    return String(value);
   return value;
 }

@@ -14,7 +14,12 @@ import {
 } from './ranges';
 import { readGas, readLayers } from './read-layer';
 import { readList, readNumber, readObject, readOptional } from './read-number';
-import type { LeaksDescription, PackDescription, SealDescription, WallDescription } from './storage-description';
+import type {
+  LeaksDescription,
+  PackDescription,
+  SealDescription,
+  WallDescription,
+} from './storage-description';
 
 /** A pack in SI. Errors: InputError with the path in the description. */
 export function readPack(value: unknown, path: string): Pack {
@@ -52,15 +57,28 @@ function readWall(value: unknown, path: string): Wall {
 function readSeal(value: unknown, path: string): Seal | null {
   if (value === undefined || value === null) return null;
   const seal = readObject<SealDescription>(value, path, 'Seal');
-  const sealantUm = readNumber(seal.sealant_thickness_um, `${path}.sealant_thickness_um`, COATING_THICKNESS_UM, {
-    label: 'Sealant thickness',
-    unit: 'µm',
-  });
-  const lengthMm = readNumber(seal.length_mm, `${path}.length_mm`, { ...LENGTH_MM, isMinExcluded: false }, {
-    label: 'Seal length',
+  const sealantUm = readNumber(
+    seal.sealant_thickness_um,
+    `${path}.sealant_thickness_um`,
+    COATING_THICKNESS_UM,
+    {
+      label: 'Sealant thickness',
+      unit: 'µm',
+    },
+  );
+  const lengthMm = readNumber(
+    seal.length_mm,
+    `${path}.length_mm`,
+    { ...LENGTH_MM, isMinExcluded: false },
+    {
+      label: 'Seal length',
+      unit: 'mm',
+    },
+  );
+  const widthMm = readNumber(seal.width_mm, `${path}.width_mm`, LENGTH_MM, {
+    label: 'Seal width',
     unit: 'mm',
   });
-  const widthMm = readNumber(seal.width_mm, `${path}.width_mm`, LENGTH_MM, { label: 'Seal width', unit: 'mm' });
   const thicknessM = widthMm * 1e-3;
   if (thicknessM * 1e6 < THICKNESS_UM.min) {
     throw new InputError(`${path}.width_mm`, widthMm, 'The seal is too narrow to compute with; widen it.');
@@ -84,7 +102,8 @@ function readLeaks(value: unknown, path: string): Leaks | null {
   return {
     count: readNumber(leaks.count, `${path}.count`, LEAK_COUNT, { label: 'Leak channels' }),
     lengthM:
-      readNumber(leaks.length_mm, `${path}.length_mm`, LENGTH_MM, { label: 'Length of a leak', unit: 'mm' }) * 1e-3,
+      readNumber(leaks.length_mm, `${path}.length_mm`, LENGTH_MM, { label: 'Length of a leak', unit: 'mm' }) *
+      1e-3,
     diameterM:
       readNumber(leaks.diameter_um, `${path}.diameter_um`, HOLE_DIAMETER_UM, {
         label: 'Diameter of a leak',

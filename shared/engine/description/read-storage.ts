@@ -41,10 +41,12 @@ export const LIMIT_NAMES: readonly LimitName[] = [
 export const MOST_LEGS_BEGUN = 100_000;
 
 /** Amount of oxygen [mol] that is so many mg per kg of food. */
-export const uptakeMol = (mgPerKg: number, massKg: number): number => (mgPerKg * 1e-6 * massKg) / OXYGEN_MOLAR_MASS;
+export const uptakeMol = (mgPerKg: number, massKg: number): number =>
+  (mgPerKg * 1e-6 * massKg) / OXYGEN_MOLAR_MASS;
 
 /** The reverse of uptakeMol. */
-export const uptakeMgPerKg = (mol: number, massKg: number): number => (mol * OXYGEN_MOLAR_MASS * 1e6) / massKg;
+export const uptakeMgPerKg = (mol: number, massKg: number): number =>
+  (mol * OXYGEN_MOLAR_MASS * 1e6) / massKg;
 
 /** A storage description in SI. Errors: InputError with path, value and remedy; nothing is corrected silently. */
 export function readStorage(description: StorageDescription): StorageSystem {
@@ -56,7 +58,10 @@ export function readStorage(description: StorageDescription): StorageSystem {
   });
   const pack = readPack(given.pack, 'pack');
   const food = readFood(given.food);
-  const horizonDays = readNumber(given.horizon_days, 'horizon_days', HORIZON_DAYS, { label: 'Horizon', unit: 'days' });
+  const horizonDays = readNumber(given.horizon_days, 'horizon_days', HORIZON_DAYS, {
+    label: 'Horizon',
+    unit: 'days',
+  });
   const { legs, isRepeated } = readRoute(given.route, horizonDays);
   return {
     pack,
@@ -89,7 +94,12 @@ export function readReportDays(value: unknown, horizonDays: number): number[] {
 
 function readFood(value: unknown): Food {
   const food = readObject<FoodDescription>(value, 'food', 'Food');
-  const mode = readChoice(food.oxygen_mode, 'food.oxygen_mode', ['at_once', 'none', 'rate'] as const, 'Oxygen mode');
+  const mode = readChoice(
+    food.oxygen_mode,
+    'food.oxygen_mode',
+    ['at_once', 'none', 'rate'] as const,
+    'Oxygen mode',
+  );
   const hasIsotherm = food.isotherm !== undefined && food.isotherm !== null;
   const referenceC = readOptional(
     food.rate_reference_temperature_C,
@@ -102,10 +112,15 @@ function readFood(value: unknown): Food {
     oxygenMode: mode,
     rateConstantSi:
       mode === 'rate'
-        ? readNumber(food.rate_constant_mol_per_kg_s_Pa, 'food.rate_constant_mol_per_kg_s_Pa', RATE_CONSTANT, {
-            label: 'Rate constant of oxygen uptake',
-            unit: 'mol/(kg·s·Pa)',
-          })
+        ? readNumber(
+            food.rate_constant_mol_per_kg_s_Pa,
+            'food.rate_constant_mol_per_kg_s_Pa',
+            RATE_CONSTANT,
+            {
+              label: 'Rate constant of oxygen uptake',
+              unit: 'mol/(kg·s·Pa)',
+            },
+          )
         : 0,
     rateEnergyJPerMol: readOptional(
       food.rate_activation_energy_J_per_mol,
@@ -129,7 +144,12 @@ function readFood(value: unknown): Food {
 
 function readRoute(value: unknown, horizonDays: number): { legs: Leg[]; isRepeated: boolean } {
   const route = readObject<RouteDescription>(value, 'route', 'Route');
-  const after = readChoice(route.after_last, 'route.after_last', ['hold', 'repeat'] as const, 'What follows the last leg');
+  const after = readChoice(
+    route.after_last,
+    'route.after_last',
+    ['hold', 'repeat'] as const,
+    'What follows the last leg',
+  );
   const list = readList<LegDescription>(route.legs, 'route.legs', LEG_COUNT, 'Legs of a route');
   let cycleDays = 0;
   const legs = list.map((item, i): Leg => {
@@ -165,14 +185,23 @@ function readLimits(
   const isGiven = (name: LimitName): boolean => given[name] !== undefined && given[name] !== null;
   const unknown = Object.keys(given).find((name) => !LIMIT_NAMES.some((known) => known === name));
   if (unknown !== undefined) {
-    throw new InputError(`limits.${unknown}`, null, `"${unknown}" is no limit; use ${LIMIT_NAMES.join(', ')}.`);
+    throw new InputError(
+      `limits.${unknown}`,
+      null,
+      `"${unknown}" is no limit; use ${LIMIT_NAMES.join(', ')}.`,
+    );
   }
   const limits: StorageSystem['limits'] = {};
   if (isGiven('oxygen_uptake_mg_per_kg')) {
-    const mgPerKg = readNumber(given.oxygen_uptake_mg_per_kg, 'limits.oxygen_uptake_mg_per_kg', UPTAKE_LIMIT_MG_PER_KG, {
-      label: 'Oxygen uptake limit',
-      unit: 'mg/kg',
-    });
+    const mgPerKg = readNumber(
+      given.oxygen_uptake_mg_per_kg,
+      'limits.oxygen_uptake_mg_per_kg',
+      UPTAKE_LIMIT_MG_PER_KG,
+      {
+        label: 'Oxygen uptake limit',
+        unit: 'mg/kg',
+      },
+    );
     limits.oxygen_uptake_mg_per_kg = uptakeMol(mgPerKg, food.massKg);
   }
   if (isGiven('headspace_oxygen_percent')) {

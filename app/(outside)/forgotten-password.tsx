@@ -1,0 +1,1 @@
+export { ForgottenPasswordScreen as default } from '../../src/features/sign-in/forgotten-password-screen';

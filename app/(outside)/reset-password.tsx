@@ -1,0 +1,1 @@
+export { ResetPasswordScreen as default } from '../../src/features/sign-in/reset-password-screen';

@@ -1,0 +1,1 @@
+export { TeamScreen as default } from '../../../../src/features/landing/team-screen';

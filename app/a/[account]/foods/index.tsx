@@ -1,0 +1,1 @@
+export { FoodsScreen as default } from '../../../../src/features/foods/foods-screen';

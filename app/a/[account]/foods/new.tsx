@@ -1,0 +1,1 @@
+export { NewFoodScreen as default } from '../../../../src/features/foods/food-screen';

@@ -1,0 +1,1 @@
+export { AccountRedirect as default } from '../../../src/features/shell/account-redirect';

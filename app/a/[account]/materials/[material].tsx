@@ -1,0 +1,1 @@
+export { MaterialScreen as default } from '../../../../src/features/materials/material-screen';

@@ -1,0 +1,10 @@
+import { Slot } from 'expo-router';
+import { PlaceGate } from '../../../../src/features/shell/place-gate';
+
+export default function MaterialsLayout() {
+  return (
+    <PlaceGate roles={['engineer', 'admin']}>
+      <Slot />
+    </PlaceGate>
+  );
+}

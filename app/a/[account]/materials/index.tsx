@@ -1,0 +1,1 @@
+export { MaterialsScreen as default } from '../../../../src/features/materials/materials-screen';

@@ -1,0 +1,1 @@
+export { NewMaterialScreen as default } from '../../../../src/features/materials/material-screen';

@@ -1,0 +1,1 @@
+export { PackScreen as default } from '../../../../src/features/packs/pack-screen';

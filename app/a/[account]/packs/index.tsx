@@ -1,0 +1,1 @@
+export { PacksScreen as default } from '../../../../src/features/packs/packs-screen';

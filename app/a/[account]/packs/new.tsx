@@ -1,0 +1,1 @@
+export { NewPackScreen as default } from '../../../../src/features/packs/pack-screen';

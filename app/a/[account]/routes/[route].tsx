@@ -1,0 +1,1 @@
+export { RouteScreen as default } from '../../../../src/features/routes/route-screen';

@@ -1,0 +1,1 @@
+export { RoutesScreen as default } from '../../../../src/features/routes/routes-screen';

@@ -1,0 +1,1 @@
+export { NewRouteScreen as default } from '../../../../src/features/routes/route-screen';

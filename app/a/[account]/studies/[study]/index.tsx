@@ -1,0 +1,1 @@
+export { StudyScreen as default } from '../../../../../src/features/studies/study-screen';

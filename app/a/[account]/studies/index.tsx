@@ -1,0 +1,1 @@
+export { StudiesListScreen as default } from '../../../../src/features/studies/studies-list-screen';

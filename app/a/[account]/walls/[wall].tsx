@@ -1,0 +1,1 @@
+export { WallScreen as default } from '../../../../src/features/walls/wall-screen';

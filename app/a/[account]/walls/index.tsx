@@ -1,0 +1,1 @@
+export { WallsScreen as default } from '../../../../src/features/walls/walls-screen';

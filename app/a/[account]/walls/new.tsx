@@ -1,0 +1,1 @@
+export { NewWallScreen as default } from '../../../../src/features/walls/wall-screen';

@@ -1,0 +1,1 @@
+export { GalleryScreen as default } from '../src/features/gallery/gallery-screen';

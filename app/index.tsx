@@ -1,0 +1,1 @@
+export { HomeRedirect as default } from '../src/features/shell/home-redirect';

@@ -1,0 +1,62 @@
+import { View } from 'react-native';
+import { formatQuantity, type DisplayUnitSystem, type ShownQuantity } from '../../../../shared/units/format';
+import type { WallInTest } from '../../../../shared/engine';
+import { useUnitSystem } from '../../../session';
+import { DataTable, Disclosure, Figure, HAIRLINE_PX, Small, SPACE, useTheme } from '../../../ui';
+import type { WallPreview } from '../wall-preview';
+
+/** The permeance under the chosen conditions, large; the standard tests under it. */
+export function TestAnswers({ preview }: { preview: WallPreview }) {
+  const unitSystem = useUnitSystem();
+  const { chosen } = preview;
+  const oxygen = formatQuantity(chosen.oxygen.permeance_mol_per_m2_s_Pa, 'oxygen_permeance_mol_per_m2_s_Pa', { unitSystem });
+  const water = formatQuantity(chosen.water.permeance_mol_per_m2_s_Pa, 'water_permeance_mol_per_m2_s_Pa', { unitSystem });
+  return (
+    <View style={{ gap: SPACE.x2 }}>
+      <View role="group" aria-label="Under these conditions" style={{ flexDirection: 'row', flexWrap: 'wrap', columnGap: SPACE.x6, rowGap: SPACE.x2 }}>
+        <Answer label="Oxygen permeance" shown={oxygen} gas="oxygen" />
+        <Answer label="Water vapour permeance" shown={water} gas="water" />
+      </View>
+      <Disclosure label="At the standard tests" isOpenAtFirst>
+        <StandardTests tests={preview.tests} unitSystem={unitSystem} />
+      </Disclosure>
+    </View>
+  );
+}
+
+function Answer({ label, shown, gas }: { label: string; shown: ShownQuantity; gas: 'oxygen' | 'water' }) {
+  const { colors } = useTheme();
+  return (
+    <View style={{ borderLeftWidth: HAIRLINE_PX * 3, borderLeftColor: colors[gas], paddingLeft: SPACE.x2, gap: 2 }}>
+      <Small>{label}</Small>
+      <Figure value={shown.figures} unit={shown.unit} size="title" isStrong />
+    </View>
+  );
+}
+
+function StandardTests({ tests, unitSystem }: { tests: WallInTest[]; unitSystem: DisplayUnitSystem }) {
+  return (
+    <DataTable
+      caption="Rates at the standard tests"
+      isCaptionHidden
+      columns={[
+        { key: 'test', title: 'Test' },
+        { key: 'rate', title: 'Rate', kind: 'figure' },
+      ]}
+      rows={tests.map((test, index) => ({
+        id: String(index),
+        test: test.test.name ?? (test.test.gas === 'oxygen' ? 'OTR' : 'WVTR'),
+        rate: shownRate(test, unitSystem),
+      }))}
+    />
+  );
+}
+
+/** A rate below what laboratories can measure says so, with its figure behind. */
+export function shownRate(test: WallInTest, unitSystem: DisplayUnitSystem): string {
+  const rate =
+    test.test.gas === 'oxygen'
+      ? formatQuantity(test.rate_cm3_STP_per_m2_day ?? NaN, 'oxygen_rate_cm3_STP_per_m2_day', { unitSystem })
+      : formatQuantity(test.rate_g_per_m2_day ?? NaN, 'water_rate_g_per_m2_day', { unitSystem });
+  return test.is_below_measurable ? `below what labs can measure (${rate.text})` : rate.text;
+}

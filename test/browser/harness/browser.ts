@@ -1,0 +1,72 @@
+import { mkdirSync } from 'node:fs';
+import path from 'node:path';
+import { chromium, type Browser, type BrowserContextOptions, type Page } from 'playwright-core';
+import { expect } from 'vitest';
+import { ROOT } from '../../harness/source-files';
+import { collectPageFaults, type PageFaults } from './page-faults';
+
+export { expectNoAxeViolations } from './axe';
+
+const CHROMIUM = '/usr/bin/chromium';
+const FLAGS = [
+  '--no-sandbox',
+  '--disable-gpu',
+  '--disable-quic',
+  '--disable-background-networking',
+  '--disable-component-update',
+  '--disable-sync',
+  '--disable-dev-shm-usage',
+];
+const ACTION_TIMEOUT_MS = 15_000;
+
+export type Device = 'phone' | 'wide';
+
+export const DEVICES = {
+  phone: { viewport: { width: 390, height: 844 }, hasTouch: true, isMobile: true, deviceScaleFactor: 2 },
+  wide: { viewport: { width: 1280, height: 800 }, hasTouch: false, isMobile: false, deviceScaleFactor: 1 },
+} as const satisfies Record<Device, BrowserContextOptions>;
+
+export interface JourneyPage {
+  page: Page;
+  faults: PageFaults;
+  /** Closes the page; fails when anything went wrong on it that no journey allowed. */
+  close: () => Promise<void>;
+}
+
+export interface JourneyBrowser {
+  /** A page with no history, no cookies and no storage. */
+  openPage: (device: Device, options?: BrowserContextOptions) => Promise<JourneyPage>;
+  close: () => Promise<void>;
+}
+
+/** Headless Chromium from Debian with a profile of its own that goes when it closes. */
+export async function launchBrowser(address: string): Promise<JourneyBrowser> {
+  const browser = await chromium.launch({ executablePath: CHROMIUM, args: FLAGS, headless: true });
+  return {
+    openPage: (device, options) => openPage(browser, { ...DEVICES[device], baseURL: address, ...options }),
+    close: () => browser.close(),
+  };
+}
+
+async function openPage(browser: Browser, options: BrowserContextOptions): Promise<JourneyPage> {
+  const context = await browser.newContext({ locale: 'en-GB', timezoneId: 'UTC', ...options });
+  const page = await context.newPage();
+  page.setDefaultTimeout(ACTION_TIMEOUT_MS);
+  const faults = collectPageFaults(page);
+  const close = async () => {
+    await context.close();
+    expect(faults.list(), 'faults on the page').toEqual([]);
+  };
+  return { page, faults, close };
+}
+
+/** Kept in test-results/screenshots after the run, for people to look at. */
+export async function screenshot(page: Page, name: string, { isFullPage = true } = {}): Promise<void> {
+  const folder = path.join(ROOT, 'test-results', 'screenshots');
+  mkdirSync(folder, { recursive: true });
+  await page.screenshot({
+    path: path.join(folder, `${name}.png`),
+    fullPage: isFullPage,
+    animations: 'disabled',
+  });
+}
