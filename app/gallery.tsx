@@ -1,1 +1,1 @@
-export { GalleryScreen as default } from '../src/features/gallery/gallery-screen';
+export { GalleryScreen as default } from '../src/features/workbench/lazy-screens';

@@ -1,7 +1,7 @@
+import { readFileSync } from 'node:fs';
 import { createServer } from 'node:http';
 import path from 'node:path';
 import { pino, type Logger } from 'pino';
-import { version } from '../package.json';
 import { createApp } from './create-app';
 import { openDatabase } from './db/client';
 import { purgeExpired } from './db/purge-expired';
@@ -22,6 +22,7 @@ const JOBS_RETRY_MS = 1_000;
 
 async function main() {
   const env = readEnv();
+  const version = readVersion();
   const logger = pino({ level: env.logLevel });
   const isSecure = env.publicUrl.startsWith('https:');
   const { db, sql, close: closeDatabase } = openDatabase(env.databaseUrl);
@@ -85,6 +86,13 @@ function smtpUrlOf(env: Env, sink: MailSink | null): string {
   const smtpUrl = sink?.smtpUrl ?? env.smtpUrl;
   if (smtpUrl === undefined) throw new Error('SMTP_URL: live mode needs a mail server.');
   return smtpUrl;
+}
+
+function readVersion(): string {
+  const { version }: { version: string } = JSON.parse(
+    readFileSync(new URL('../package.json', import.meta.url), 'utf8'),
+  );
+  return version;
 }
 
 /** The queue needs the database; while that is silent the server answers already and this is tried again. */

@@ -10,7 +10,7 @@ import { runScript, say } from './say.mjs';
  */
 
 /** Found by their place: routes, start-up scripts, tests, tool configuration. */
-const ENTRY_FILE = /^(app\/|server\/bin\/|test\/|server\/main\.ts$)|\.test\.tsx?$/;
+const ENTRY_FILE = /^(app\/|server\/bin\/|test\/|server\/main\.ts$)|\.test\.tsx?$|\.d\.ts$/;
 
 await runScript(async () => {
   const files = ['app', 'src', 'server', 'shared', 'test'].flatMap(listFiles).map(readFile);

@@ -1,4 +1,4 @@
-import { mkdirSync, readFileSync, readdirSync, rmSync, writeFileSync } from 'node:fs';
+import { mkdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
 import { setTimeout as sleep } from 'node:timers/promises';
 
@@ -36,15 +36,6 @@ export function findRecordedProcess(file) {
 /** @param {string} file */
 export function forgetProcess(file) {
   rmSync(file, { force: true });
-}
-
-/** @param {string} folder */
-export function listRecords(folder) {
-  try {
-    return readdirSync(folder).map((name) => path.join(folder, name));
-  } catch {
-    return [];
-  }
 }
 
 /**

@@ -23,7 +23,7 @@ export async function ensureWebBuild() {
 }
 
 /** @param {string} [hash] */
-export async function buildWeb(hash = hashWebInputs()) {
+async function buildWeb(hash = hashWebInputs()) {
   say('Building the web client (about half a minute) …');
   recordProcess(BUILD_RECORD, process.pid);
   try {

@@ -31,12 +31,16 @@ export function measureFirstScreen(folder) {
  * @returns {string[]}
  */
 function findRouteChunks(folder) {
-  const entryName = readdirSync(path.join(folder, CHUNK_FOLDER)).find((name) => /^entry-.*\.js$/.test(name)) ?? '';
+  const entryName =
+    readdirSync(path.join(folder, CHUNK_FOLDER)).find((name) => /^entry-.*\.js$/.test(name)) ?? '';
   const entry = readFileSync(path.join(folder, CHUNK_FOLDER, entryName), 'utf8');
   const list = /\{"0":[^{}]*"paths":\{[^{}]*\}\}/.exec(entry)?.[0];
-  if (list === undefined) throw new Error('The web build names no route chunks; server/bin/web-size.mjs reads another format.');
+  if (list === undefined)
+    throw new Error('The web build names no route chunks; server/bin/web-size.mjs reads another format.');
   const { paths, ...modules } = JSON.parse(list);
-  const routes = [...entry.matchAll(/"(\.\/[^"]+\.tsx)":\{enumerable:!0,get:\(\)=>\w+\(\w+\[\d+\]\)\(\w+\[(\d+)\]/g)];
+  const routes = [
+    ...entry.matchAll(/"(\.\/[^"]+\.tsx)":\{enumerable:!0,get:\(\)=>\w+\(\w+\[\d+\]\)\(\w+\[(\d+)\]/g),
+  ];
   return routes
     .filter(([, route]) => FIRST_ROUTES.includes(route ?? ''))
     .flatMap(([, , place]) => paths[modules[place ?? '']] ?? [])

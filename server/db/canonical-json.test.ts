@@ -1,5 +1,5 @@
 import canonicalize from 'canonicalize';
-import fc from 'fast-check';
+import * as fc from 'fast-check';
 import { expect, it } from 'vitest';
 import { canonicalJson } from './canonical-json';
 
@@ -24,7 +24,9 @@ it('agrees with another implementation', () => {
 });
 
 it('sorts by UTF-16 code units and leaves undefined out', () => {
-  expect(canonicalJson({ '\u{1f600}': 1, '\ufb33': 2, b: undefined, a: 0 })).toBe('{"a":0,"\u{1f600}":1,"\ufb33":2}');
+  expect(canonicalJson({ '\u{1f600}': 1, '\ufb33': 2, b: undefined, a: 0 })).toBe(
+    '{"a":0,"\u{1f600}":1,"\ufb33":2}',
+  );
 });
 
 it('refuses what JSON cannot say', () => {

@@ -27,8 +27,19 @@ export async function insertThing<Spec>(
   const id = newId();
   const revisionId = newId();
   // The deferred foreign key is checked at commit, when both rows are there.
-  const [thing] = await tx.insert(tables.things).values({ id, accountId, currentRevisionId: revisionId }).returning();
-  const revision = await insertRow(tx, tables, { id: revisionId, accountId, thingId: id, number: 1, spec, note, createdBy });
+  const [thing] = await tx
+    .insert(tables.things)
+    .values({ id, accountId, currentRevisionId: revisionId })
+    .returning();
+  const revision = await insertRow(tx, tables, {
+    id: revisionId,
+    accountId,
+    thingId: id,
+    number: 1,
+    spec,
+    note,
+    createdBy,
+  });
   return { id, created_at: (thing?.createdAt ?? new Date()).toISOString(), revision };
 }
 
@@ -40,7 +51,15 @@ export async function insertRevision<Spec>(
 ): Promise<KeptThing<Spec>> {
   const id = newId();
   const number = base.revision.number + 1;
-  const revision = await insertRow(tx, tables, { id, accountId, thingId: base.id, number, spec, note, createdBy });
+  const revision = await insertRow(tx, tables, {
+    id,
+    accountId,
+    thingId: base.id,
+    number,
+    spec,
+    note,
+    createdBy,
+  });
   await tx.update(tables.things).set({ currentRevisionId: id }).where(eq(tables.things.id, base.id));
   return { ...base, revision };
 }
@@ -72,7 +91,9 @@ export async function findThings<Spec>(
 ): Promise<KeptThing<Spec>[]> {
   if (ids.length === 0) return [];
   const { things } = tables;
-  const rows = await selectThings(db, tables).where(and(eq(things.accountId, accountId), inArray(things.id, [...ids])));
+  const rows = await selectThings(db, tables).where(
+    and(eq(things.accountId, accountId), inArray(things.id, [...ids])),
+  );
   return rows.map((row) => asKeptThing<Spec>(row));
 }
 
@@ -154,10 +175,21 @@ function isThing<Spec>({ things }: ThingTables<Spec>, { accountId, id }: { accou
 async function insertRow<Spec>(
   tx: Transaction,
   { revisions }: ThingTables<Spec>,
-  row: { id: string; accountId: string; thingId: string; number: number; spec: Spec; note?: string; createdBy: string | null },
+  row: {
+    id: string;
+    accountId: string;
+    thingId: string;
+    number: number;
+    spec: Spec;
+    note?: string;
+    createdBy: string | null;
+  },
 ): Promise<Revision<Spec>> {
   const table: RevisionTable<unknown> = revisions;
-  const [inserted] = await tx.insert(table).values({ ...row, note: row.note ?? '' }).returning();
+  const [inserted] = await tx
+    .insert(table)
+    .values({ ...row, note: row.note ?? '' })
+    .returning();
   if (!inserted) throw new Error('The revision was not written.');
   return asRevision<Spec>(inserted);
 }

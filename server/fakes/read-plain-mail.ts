@@ -29,6 +29,8 @@ function decodeWords(text: string): string {
 
 function decodeQuoted(text: string): string {
   const bytes = Buffer.from(text, 'utf8').toString('latin1');
-  const decoded = bytes.replace(/=([0-9a-f]{2})/gi, (_whole, hex: string) => String.fromCharCode(parseInt(hex, 16)));
+  const decoded = bytes.replace(/=([0-9a-f]{2})/gi, (_whole, hex: string) =>
+    String.fromCharCode(parseInt(hex, 16)),
+  );
   return Buffer.from(decoded, 'latin1').toString('utf8');
 }

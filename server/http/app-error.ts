@@ -31,12 +31,17 @@ export function notFound(): AppError {
 }
 
 export function inputInvalid(fields: FieldFault[]): AppError {
-  const message = fields.length === 1 ? (fields[0]?.message ?? '') : `${fields.length} fields need another value.`;
+  const message =
+    fields.length === 1 ? (fields[0]?.message ?? '') : `${fields.length} fields need another value.`;
   return new AppError('input_invalid', message, { fields });
 }
 
 export function editedMeanwhile(current: unknown): AppError {
-  return new AppError('edited_meanwhile', 'Somebody saved a newer revision meanwhile. Compare, then save on top of it.', {
-    current,
-  });
+  return new AppError(
+    'edited_meanwhile',
+    'Somebody saved a newer revision meanwhile. Compare, then save on top of it.',
+    {
+      current,
+    },
+  );
 }

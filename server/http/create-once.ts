@@ -28,14 +28,23 @@ export async function createOnce(
     }
     const answer = await create(tx);
     const json = JSON.stringify(answer.body);
-    await tx.update(idempotencyKeys).set({ status: answer.status, body: json, etag: answer.etag }).where(isThisKey);
+    await tx
+      .update(idempotencyKeys)
+      .set({ status: answer.status, body: json, etag: answer.etag })
+      .where(isThisKey);
     return { ...answer, json };
   });
 }
 
-function answerAgain(earlier: typeof idempotencyKeys.$inferSelect | undefined, requestSha256: string): Answer {
+function answerAgain(
+  earlier: typeof idempotencyKeys.$inferSelect | undefined,
+  requestSha256: string,
+): Answer {
   if (earlier?.requestSha256 !== requestSha256) {
-    throw new AppError('idempotency_key_reused', 'This Idempotency-Key was used for something else. Take a new one.');
+    throw new AppError(
+      'idempotency_key_reused',
+      'This Idempotency-Key was used for something else. Take a new one.',
+    );
   }
   return {
     status: earlier.status,

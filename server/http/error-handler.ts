@@ -12,6 +12,8 @@ export const answerUnknownPath: RequestHandler = () => {
 
 /** The one place where an error becomes an answer. */
 export function handleErrors(logger: Logger): ErrorRequestHandler {
+  // Express tells an error handler by its four parameters.
+  // eslint-disable-next-line max-params
   return (error: unknown, request, response, next) => {
     const appError = asAppError(error);
     if (appError.code === 'internal' || appError.code === 'database_silent') {
@@ -49,11 +51,18 @@ function asAppError(error: unknown): AppError {
     return inputInvalid([{ path: error.path, value, message: error.message }]);
   }
   if (isDatabaseSilent(error)) {
-    return new AppError('database_silent', 'The database does not answer. Nothing was lost; try again in a moment.', {
-      cause: error,
-    });
+    return new AppError(
+      'database_silent',
+      'The database does not answer. Nothing was lost; try again in a moment.',
+      {
+        cause: error,
+      },
+    );
   }
-  return fromBodyParser(error) ?? new AppError('internal', 'Something went wrong on our side. Try again in a moment.', { cause: error });
+  return (
+    fromBodyParser(error) ??
+    new AppError('internal', 'Something went wrong on our side. Try again in a moment.', { cause: error })
+  );
 }
 
 /** What Express and its body parser throw about the request itself. */
@@ -61,11 +70,16 @@ function fromBodyParser(error: unknown): AppError | undefined {
   if (!(error instanceof Error)) return undefined;
   if (error instanceof URIError) return notFound();
   const status = 'status' in error ? error.status : undefined;
-  if (status === 413) return new AppError('file_too_large', 'The request is larger than 1 MB. Send less at once.');
+  if (status === 413)
+    return new AppError('file_too_large', 'The request is larger than 1 MB. Send less at once.');
   const type = 'type' in error ? error.type : undefined;
   if (type === 'entity.parse.failed') {
-    return inputInvalid([{ path: '', message: 'This is not JSON. Numbers must be finite, names in double quotes.' }]);
+    return inputInvalid([
+      { path: '', message: 'This is not JSON. Numbers must be finite, names in double quotes.' },
+    ]);
   }
   const isClientFault = typeof status === 'number' && status >= 400 && status < 500;
-  return isClientFault ? inputInvalid([{ path: '', message: 'The request could not be read. Send JSON in UTF-8.' }]) : undefined;
+  return isClientFault
+    ? inputInvalid([{ path: '', message: 'The request could not be read. Send JSON in UTF-8.' }])
+    : undefined;
 }

@@ -5,7 +5,11 @@ import { memberships } from '../db/schema';
 import type { Actor } from './route-definition';
 
 /** What a user is in one account; undefined for a stranger. */
-export async function findActor(db: Queryable, userId: string, accountId: string): Promise<Actor | undefined> {
+export async function findActor(
+  db: Queryable,
+  userId: string,
+  accountId: string,
+): Promise<Actor | undefined> {
   const [row] = await db
     .select()
     .from(memberships)
@@ -15,7 +19,10 @@ export async function findActor(db: Queryable, userId: string, accountId: string
 
 /** Every role that a user has anywhere. */
 export async function findRolesAnywhere(db: Queryable, userId: string): Promise<Role[]> {
-  const rows = await db.select({ roles: memberships.roles }).from(memberships).where(eq(memberships.userId, userId));
+  const rows = await db
+    .select({ roles: memberships.roles })
+    .from(memberships)
+    .where(eq(memberships.userId, userId));
   return rows.flatMap((row) => row.roles.filter(isRole));
 }
 

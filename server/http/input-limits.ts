@@ -23,7 +23,8 @@ export function findUnkeepable(body: unknown): FieldFault | undefined {
     if (message !== undefined) return { path: place.path, message };
     if (typeof place.value !== 'object' || place.value === null) continue;
     for (const [key, value] of Object.entries(place.value)) {
-      if (isUnkeepableText(key)) return { path: place.path, message: 'A field name holds characters that cannot be kept.' };
+      if (isUnkeepableText(key))
+        return { path: place.path, message: 'A field name holds characters that cannot be kept.' };
       open.push({ value, path: pathOf(place, key), depth: place.depth + 1 });
     }
   }

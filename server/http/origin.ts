@@ -7,7 +7,10 @@ export function checkOrigin(request: Request, allowedOrigins: readonly string[])
   const hasCookie = request.headers.cookie !== undefined;
   const isRefused = origin === undefined ? hasCookie : !allowedOrigins.includes(origin);
   if (isRefused) {
-    throw new AppError('origin_refused', `This page may not write here. Open ${allowedOrigins[0] ?? 'the product'} and try again.`);
+    throw new AppError(
+      'origin_refused',
+      `This page may not write here. Open ${allowedOrigins[0] ?? 'the product'} and try again.`,
+    );
   }
 }
 

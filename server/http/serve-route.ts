@@ -31,37 +31,40 @@ const parseJson = express.json({ limit: MOST_BODY_BYTES, strict: false });
 /** Registers one route: origin, session, access, then body and preconditions, then the handler. */
 export function serveRoute(router: Router, route: RouteDefinition, options: ServeOptions): void {
   const handler: RequestHandler = async (request, response) => {
-    await withinDeadline(answerRequest(route, options, request, response));
+    await withinDeadline(answerRequest(route, options, { request, response }));
   };
   router[route.method](route.path, handler);
 }
 
-async function answerRequest(route: RouteDefinition, options: ServeOptions, request: Request, response: Response) {
+interface Exchange {
+  request: Request;
+  response: Response;
+}
+
+async function answerRequest(route: RouteDefinition, options: ServeOptions, exchange: Exchange) {
+  const { request, response } = exchange;
   const isWrite = route.method !== 'get';
   if (isWrite) checkOrigin(request, options.allowedOrigins);
-  const user = await findUser(route, options, request, response);
-  const actor = await authorise(route, options, request, user);
+  const user = route.access.kind === 'public' ? null : await requireUser(options.sessions, exchange);
+  const params = pathParams(request);
+  const actor = await authorise(route, options.db, { params, user });
   if (isWrite) await readBody(request, response);
   const context: FullContext = {
     body: route.requestSchema ? validateBody(route.requestSchema, request.body) : undefined,
     query: route.querySchema ? validateQuery(route.querySchema, request.query) : {},
-    params: pathParams(request),
+    params,
     networkAddress: request.socket.remoteAddress ?? '',
     user,
     actor,
     ifMatch: route.wants === 'if-match' ? readIfMatch(request) : '',
     once: route.wants === 'idempotency-key' ? readOnce(request, user) : null,
   };
-  await sendAnswer(route, options, request, response, await route.handle(context));
+  const answer = await route.handle(context);
+  if (options.isCheckingAnswers) checkAnswer(route, answer);
+  await sendAnswer(exchange, answer);
 }
 
-async function findUser(
-  route: RouteDefinition,
-  { sessions }: ServeOptions,
-  request: Request,
-  response: Response,
-): Promise<SignedInUser | null> {
-  if (route.access.kind === 'public') return null;
+async function requireUser(sessions: Sessions, { request, response }: Exchange): Promise<SignedInUser> {
   const found = request.headers.cookie ? await sessions.find(request.headers.cookie) : null;
   if (found === null) throw new AppError('session_missing', 'Sign in first.');
   if (found.setCookie) response.append('Set-Cookie', found.setCookie);
@@ -70,21 +73,18 @@ async function findUser(
 }
 
 async function authorise(
-  route: RouteDefinition,
-  { db }: ServeOptions,
-  request: Request,
-  user: SignedInUser | null,
+  { access }: RouteDefinition,
+  db: Queryable,
+  { params, user }: { params: Record<string, string>; user: SignedInUser | null },
 ): Promise<Actor | null> {
-  const params = Object.values(pathParams(request));
-  if (!params.every((param) => UUID.test(param))) throw notFound();
-  const { access } = route;
+  if (!Object.values(params).every((param) => UUID.test(param))) throw notFound();
   if (access.kind === 'public' || access.kind === 'signed in' || user === null) return null;
   if (access.kind === 'role in any account') {
     const roles = await findRolesAnywhere(db, user.userId);
     if (!roles.some((role) => access.roles.includes(role))) throw notFound();
     return null;
   }
-  const actor = await findActor(db, user.userId, pathParams(request).account_id ?? '');
+  const actor = await findActor(db, user.userId, params.account_id ?? '');
   if (!actor?.roles.some((role) => access.roles.includes(role))) throw notFound();
   return actor;
 }
@@ -105,7 +105,10 @@ function readBody(request: Request, response: Response): Promise<void> {
 function readIfMatch(request: Request): string {
   const header = request.get('If-Match');
   if (!header) {
-    throw new AppError('precondition_missing', 'Send If-Match with the revision that was edited, so that no edit is lost.');
+    throw new AppError(
+      'precondition_missing',
+      'Send If-Match with the revision that was edited, so that no edit is lost.',
+    );
   }
   return header.replace(/^"|"$/g, '');
 }
@@ -113,25 +116,25 @@ function readIfMatch(request: Request): string {
 function readOnce(request: Request, user: SignedInUser | null): Once {
   const key = request.get('Idempotency-Key') ?? '';
   if (key === '') {
-    throw new AppError('precondition_missing', 'Send an Idempotency-Key, so that sending twice makes one thing.');
+    throw new AppError(
+      'precondition_missing',
+      'Send an Idempotency-Key, so that sending twice makes one thing.',
+    );
   }
   if (key.length > LONGEST_KEY || !/^[\x21-\x7e]+$/.test(key)) {
-    throw new AppError('input_invalid', `Idempotency-Key: 1 to ${LONGEST_KEY} characters, letters, digits and signs.`, {
-      fields: [{ path: 'Idempotency-Key', message: `Use 1 to ${LONGEST_KEY} letters, digits and signs.` }],
-    });
+    throw new AppError(
+      'input_invalid',
+      `Idempotency-Key: 1 to ${LONGEST_KEY} characters, letters, digits and signs.`,
+      {
+        fields: [{ path: 'Idempotency-Key', message: `Use 1 to ${LONGEST_KEY} letters, digits and signs.` }],
+      },
+    );
   }
   const fingerprint = `${request.method} ${request.path} ${canonicalJson(request.body ?? null)}`;
   return { userId: user?.userId ?? '', key, requestSha256: sha256Hex(fingerprint) };
 }
 
-async function sendAnswer(
-  route: RouteDefinition,
-  { isCheckingAnswers }: ServeOptions,
-  request: Request,
-  response: Response,
-  answer: Answer,
-) {
-  if (isCheckingAnswers) checkAnswer(route, answer);
+async function sendAnswer({ request, response }: Exchange, answer: Answer) {
   if (answer.setCookie) response.append('Set-Cookie', answer.setCookie);
   if (answer.etag) response.set('ETag', `"${answer.etag}"`);
   response.status(answer.status);
@@ -142,16 +145,25 @@ async function sendAnswer(
 /** Thrown as an internal error: the fault is ours, not the caller's. */
 function checkAnswer(route: RouteDefinition, answer: Answer) {
   const schema = route.responses[answer.status];
-  if (schema === undefined) throw new Error(`${route.path} answers ${answer.status}, which its definition does not list.`);
+  if (schema === undefined)
+    throw new Error(`${route.path} answers ${answer.status}, which its definition does not list.`);
   if (schema === null) return;
-  schema.validateSync(JSON.parse(answer.json ?? JSON.stringify(answer.body)), { strict: true, abortEarly: false });
+  schema.validateSync(JSON.parse(answer.json ?? JSON.stringify(answer.body)), {
+    strict: true,
+    abortEarly: false,
+  });
 }
 
 async function withinDeadline(work: Promise<void>): Promise<void> {
   let timer: NodeJS.Timeout | undefined;
   const deadline = new Promise<never>((_resolve, reject) => {
     timer = setTimeout(() => {
-      reject(new AppError('database_silent', 'The database does not answer. Nothing was lost; try again in a moment.'));
+      reject(
+        new AppError(
+          'database_silent',
+          'The database does not answer. Nothing was lost; try again in a moment.',
+        ),
+      );
     }, DEADLINE_MS);
   });
   try {

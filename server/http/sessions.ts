@@ -52,7 +52,8 @@ function hashing(adapter: Adapter): Adapter {
     },
     getUserSessions: (userId) => adapter.getUserSessions(userId),
     setSession: (session) => adapter.setSession({ ...session, id: sha256Hex(session.id) }),
-    updateSessionExpiration: (sessionId, expiresAt) => adapter.updateSessionExpiration(sha256Hex(sessionId), expiresAt),
+    updateSessionExpiration: (sessionId, expiresAt) =>
+      adapter.updateSessionExpiration(sha256Hex(sessionId), expiresAt),
     deleteSession: (sessionId) => adapter.deleteSession(sha256Hex(sessionId)),
     deleteUserSessions: (userId) => adapter.deleteUserSessions(userId),
     deleteExpiredSessions: () => adapter.deleteExpiredSessions(),

@@ -11,7 +11,9 @@ export function validateBody<Body>(schema: Schema<Body>, body: unknown): Body {
   const unkeepable = findUnkeepable(body);
   if (unkeepable !== undefined) throw inputInvalid([unkeepable]);
   if (typeof body !== 'object' || body === null || Array.isArray(body)) {
-    throw inputInvalid([{ path: '', message: 'Send a JSON object, with the header Content-Type: application/json.' }]);
+    throw inputInvalid([
+      { path: '', message: 'Send a JSON object, with the header Content-Type: application/json.' },
+    ]);
   }
   return validate(schema, body, { isStrict: true });
 }
@@ -37,7 +39,9 @@ function validate<Value>(schema: Schema<Value>, value: unknown, { isStrict }: { 
 function faultsOf(error: ValidationError): FieldFault[] {
   const single = error.inner.length > 0 ? error.inner : [error];
   // The outer first: "at most 50 layers" must not drown in the faults of the layers.
-  const outerFirst = single.flatMap(faultsOfOne).sort((one, other) => depthOf(one.path) - depthOf(other.path));
+  const outerFirst = single
+    .flatMap(faultsOfOne)
+    .sort((one, other) => depthOf(one.path) - depthOf(other.path));
   return outerFirst.slice(0, MOST_FAULTS);
 }
 
@@ -52,7 +56,13 @@ function faultsOfOne(error: ValidationError): FieldFault[] {
   if (typeof unknownKeys === 'string') {
     return unknownKeys.split(', ').map((key) => ({ path: path === '' ? key : `${path}.${key}`, message }));
   }
-  return [{ path, value: shownValue(error.params?.originalValue), message: isYupsOwn(message) ? kindWanted(error) : message }];
+  return [
+    {
+      path,
+      value: shownValue(error.params?.originalValue),
+      message: isYupsOwn(message) ? kindWanted(error) : message,
+    },
+  ];
 }
 
 /** Said by yup where the contract says nothing of its own: an object, a list or a text in the wrong place. */

@@ -88,7 +88,10 @@ function placeOf(root: string, urlPath: string): string | undefined {
 async function send(request: Request, response: Response, { file, place }: { file: WebFile; place: string }) {
   const extension = path.extname(place);
   response.set('Content-Type', CONTENT_TYPES[extension] ?? 'application/octet-stream');
-  response.set('Cache-Control', HASHED_NAME.test(path.basename(place)) ? 'public, max-age=31536000, immutable' : 'no-cache');
+  response.set(
+    'Cache-Control',
+    HASHED_NAME.test(path.basename(place)) ? 'public, max-age=31536000, immutable' : 'no-cache',
+  );
   response.set('ETag', file.etag);
   if (!COMPRESSIBLE.test(place)) {
     response.send(file.bytes);

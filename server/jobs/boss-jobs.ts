@@ -25,16 +25,20 @@ export function bossJobs({ sql, logger }: { sql: DatabaseConnection['sql']; logg
   }
 
   async function work<Name extends JobQueue>(name: Name, handle: (data: JobData[Name]) => Promise<void>) {
-    await boss.work<JobData[Name]>(name, { batchSize: 1, pollingIntervalSeconds: POLL_EVERY_S }, async (jobs) => {
-      for (const job of jobs) {
-        try {
-          await handle(job.data);
-        } catch (error) {
-          logger.warn({ err: error, job: name, job_id: job.id }, 'job failed, will be tried again');
-          throw error;
+    await boss.work<JobData[Name]>(
+      name,
+      { batchSize: 1, pollingIntervalSeconds: POLL_EVERY_S },
+      async (jobs) => {
+        for (const job of jobs) {
+          try {
+            await handle(job.data);
+          } catch (error) {
+            logger.warn({ err: error, job: name, job_id: job.id }, 'job failed, will be tried again');
+            throw error;
+          }
         }
-      }
-    });
+      },
+    );
   }
 
   return {

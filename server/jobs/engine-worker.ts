@@ -14,6 +14,10 @@ function reply(taskId: number, description: EngineTask['description']): EngineRe
     if (error instanceof InputError) {
       return { taskId, ending: 'refused', path: error.path, value: error.value, message: error.message };
     }
-    return { taskId, ending: 'failed', message: error instanceof Error ? (error.stack ?? error.message) : String(error) };
+    return {
+      taskId,
+      ending: 'failed',
+      message: error instanceof Error ? (error.stack ?? error.message) : String(error),
+    };
   }
 }

@@ -16,7 +16,7 @@ export interface EngineWorkers extends EnginePort {
 }
 
 /** Thrown where a computation takes longer than anybody waits. */
-export class EngineTimeoutError extends Error {}
+class EngineTimeoutError extends Error {}
 
 interface Task {
   description: EvaluationDescription;
@@ -75,7 +75,8 @@ export function engineWorkers({ threads }: { threads: number }): EngineWorkers {
 
   function dispatch() {
     while (waiting.length > 0 && !isStopped) {
-      const free = [...lanes].find((lane) => lane.task === null) ?? (lanes.size < threads ? openLane() : undefined);
+      const free =
+        [...lanes].find((lane) => lane.task === null) ?? (lanes.size < threads ? openLane() : undefined);
       const task = free && waiting.shift();
       if (!free || !task) return;
       free.task = task;

@@ -10,12 +10,20 @@ const text = () => yup.string().strict().defined();
 const numbers = () => yup.array(number()).strict().required();
 
 const reachedLimitSchema = closedObject({
-  status: yup.string().strict().oneOf(['reached'] as const).required(),
+  status: yup
+    .string()
+    .strict()
+    .oneOf(['reached'] as const)
+    .required(),
   days: number(),
 });
 
 const unreachedLimitSchema = closedObject({
-  status: yup.string().strict().oneOf(['not reached'] as const).required(),
+  status: yup
+    .string()
+    .strict()
+    .oneOf(['not reached'] as const)
+    .required(),
   value_at_horizon: number(),
   settles_at: yup.number().strict().nullable().optional(),
 });
@@ -62,7 +70,7 @@ const oxygenThroughWallSchema = closedObject({
   resistance_share: numbers(),
 });
 
-export const wallOnLegSchema = closedObject({
+const wallOnLegSchema = closedObject({
   leg: number(),
   leg_name: yup.string().strict().optional(),
   starts_day: number(),
@@ -82,7 +90,7 @@ export const testInAnswerSchema = yup.lazy((test: unknown) => {
   return isOxygen ? oxygenTestSchema.required() : waterTestSchema.required();
 });
 
-export const wallInTestSchema = closedObject({
+const wallInTestSchema = closedObject({
   test: testInAnswerSchema,
   permeance_mol_per_m2_s_Pa: number(),
   rate_cm3_STP_per_m2_day: yup.number().strict().optional(),
@@ -99,7 +107,11 @@ export const wallAnswerSchema = closedObject({
     .array(
       closedObject({
         name: text(),
-        kind: yup.string().strict().oneOf(['film', 'coating', 'foil'] as const).required(),
+        kind: yup
+          .string()
+          .strict()
+          .oneOf(['film', 'coating', 'foil'] as const)
+          .required(),
         thickness_um: number(),
       }),
     )
@@ -109,7 +121,7 @@ export const wallAnswerSchema = closedObject({
   tests: yup.array(wallInTestSchema).strict().required(),
 });
 
-export const gasConductanceSchema = closedObject({
+const gasConductanceSchema = closedObject({
   walls_mol_per_s_Pa: numbers(),
   seal_mol_per_s_Pa: number(),
   leaks_mol_per_s_Pa: number(),
@@ -137,7 +149,11 @@ const warningSchema = closedObject({
 
 const solverReportSchema = closedObject({
   method: text(),
-  status: yup.string().strict().oneOf(['finished', 'step limit reached'] as const).required(),
+  status: yup
+    .string()
+    .strict()
+    .oneOf(['finished', 'step limit reached'] as const)
+    .required(),
   relative_tolerance: number(),
   accepted_steps: number(),
   rejected_steps: number(),

@@ -12,8 +12,16 @@ export interface HealthResponse {
 }
 
 export const healthResponseSchema = closedObject({
-  status: yup.string().strict().oneOf(['ok', 'degraded'] as const).required(),
-  database: yup.string().strict().oneOf(['answers', 'silent'] as const).required(),
+  status: yup
+    .string()
+    .strict()
+    .oneOf(['ok', 'degraded'] as const)
+    .required(),
+  database: yup
+    .string()
+    .strict()
+    .oneOf(['answers', 'silent'] as const)
+    .required(),
   version: yup.string().strict().required(),
   engine_version: yup.string().strict().required(),
 });

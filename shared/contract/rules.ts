@@ -31,7 +31,7 @@ export const RULES = {
   isothermIntercept: { label: 'Intercept', unit: 'g/g', min: -10, max: 10 },
   gabMonolayer: { label: 'Monolayer moisture Xm', unit: 'g/g', min: 0, max: 10, isMinExcluded: true },
   gabC: { label: 'C', unit: '', min: 0, max: 1e6, isMinExcluded: true },
-  gabK: { label: 'K', unit: '', min: 0, max: 1.2, isMinExcluded: true },
+  gabK: { label: 'K', unit: '', min: 0, max: 1, isMinExcluded: true },
   absorber: { label: 'Absorber capacity', unit: 'cm³', min: 0, max: 1e6 },
   oxygenUptake: { label: 'Oxygen limit', unit: 'mg/kg', min: 0, max: 1e6, isMinExcluded: true },
   headspaceLimit: { label: 'Headspace oxygen limit', unit: '%', min: 0, max: 100, isMinExcluded: true },
@@ -39,7 +39,7 @@ export const RULES = {
   legDays: { label: 'Days', unit: 'days', min: 0, max: 36_500, isMinExcluded: true },
   targetDays: { label: 'Target', unit: 'days', min: 0, max: 36_500, isMinExcluded: true },
   horizonDays: { label: 'Horizon', unit: 'days', min: 0, max: 36_500, isMinExcluded: true },
-  totalPressure: { label: 'Total pressure', unit: 'Pa', min: 10_000, max: 1e6 },
+  totalPressure: { label: 'Total pressure', unit: 'Pa', min: 20_000, max: 1e6 },
   density: { label: 'Density', unit: 'kg/m³', min: 0, max: 25_000, isMinExcluded: true },
   price: { label: 'Price', unit: '', min: 0, max: 1e6 },
 } as const satisfies Record<string, QuantityRule>;

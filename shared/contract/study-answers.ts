@@ -19,7 +19,13 @@ const candidateLayerSchema = closedObject({
   kind: yup.string().strict().oneOf(MATERIAL_KINDS).required(),
   thickness_um: yup.number().strict().required(),
   leans_on: yup
-    .array(yup.string().strict().oneOf(['memory', 'invented', 'common-practice'] as const).required())
+    .array(
+      yup
+        .string()
+        .strict()
+        .oneOf(['memory', 'invented', 'common-practice'] as const)
+        .required(),
+    )
     .strict()
     .required(),
 });

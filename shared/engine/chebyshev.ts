@@ -53,6 +53,61 @@ export function openEnd(coefficients: Float64Array): number {
   return Math.abs(coefficients[DEGREE]) + Math.abs(coefficients[DEGREE - 1]);
 }
 
+/**
+ * The points of degree 4 (every second one) and of degree 2 (every fourth) are among those of degree 8, so a step may
+ * be tried with few of them and the others filled in by the polynomial through those few.
+ */
+function fillMatrix(known: readonly number[], wanted: readonly number[]): Float64Array {
+  const matrix = new Float64Array(known.length * wanted.length);
+  wanted.forEach((node, row) => {
+    known.forEach((through, column) => {
+      let product = 1;
+      for (const other of known) {
+        if (other !== through) product *= (NODES[node] - NODES[other]) / (NODES[through] - NODES[other]);
+      }
+      matrix[row * known.length + column] = product;
+    });
+  });
+  return matrix;
+}
+
+const OF_TWO = [0, 4, 8];
+const BESIDE_TWO = [1, 2, 3, 5, 6, 7];
+const OF_FOUR = [0, 2, 4, 6, 8];
+const BESIDE_FOUR = [1, 3, 5, 7];
+const FROM_TWO = fillMatrix(OF_TWO, BESIDE_TWO);
+const FROM_FOUR = fillMatrix(OF_FOUR, BESIDE_FOUR);
+
+/** Fills the other nodes from nodes 0, 4 and 8. */
+export function fillFromTwo(values: Float64Array): void {
+  for (let row = 0; row < 6; row++) {
+    values[BESIDE_TWO[row]] =
+      FROM_TWO[row * 3] * values[0] + FROM_TWO[row * 3 + 1] * values[4] + FROM_TWO[row * 3 + 2] * values[8];
+  }
+}
+
+/** Fills the odd nodes from the even ones. */
+export function fillFromFour(values: Float64Array): void {
+  for (let row = 0; row < 4; row++) {
+    let sum = 0;
+    for (let column = 0; column < 5; column++) sum += FROM_FOUR[row * 5 + column] * values[2 * column];
+    values[BESIDE_FOUR[row]] = sum;
+  }
+}
+
+/** Last coefficient of the parabola through nodes 0, 4 and 8. */
+export function openEndOfTwo(values: Float64Array): number {
+  return Math.abs(values[0] - 2 * values[4] + values[8]) / 4;
+}
+
+/** Sum of the last two coefficients of the polynomial of degree 4 through the even nodes. */
+export function openEndOfFour(values: Float64Array): number {
+  const half = Math.SQRT1_2;
+  const third = (0.5 * (values[8] - values[0]) + half * (values[2] - values[6])) / 2;
+  const fourth = (0.5 * (values[0] + values[8]) - values[2] + values[4] - values[6]) / 4;
+  return Math.abs(third) + Math.abs(fourth);
+}
+
 /** Coefficients (ten) of the integral from 0 of a polynomial on [0, 1] given by nine. */
 export function integrate(coefficients: Float64Array, integral: Float64Array): void {
   const c = coefficients;

@@ -33,9 +33,13 @@ export function evaluate(description: EvaluationDescription): EvaluationAnswer {
   const targetDays =
     description.target_days === undefined || description.target_days === null
       ? null
-      : readNumber(description.target_days, 'target_days', TARGET_DAYS, { label: 'Target', unit: 'days' });
+      : readNumber(description.target_days, 'target_days', {
+          range: TARGET_DAYS,
+          label: 'Target',
+          unit: 'days',
+        });
   const tests = description.tests ?? standardTests;
-  readList(tests, 'tests', TEST_COUNT, 'Tests');
+  readList(tests, 'tests', { range: TEST_COUNT, label: 'Tests' });
   const run = runStorage(system, MOST_LEGS_SHOWN);
   const answer = answerOf(description, system, run);
   const walls = system.pack.walls.map((wall, i): WallAnswer => ({

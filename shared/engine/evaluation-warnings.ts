@@ -24,12 +24,12 @@ export function warningsOf(system: StorageSystem, run: StorageRun, walls: WallAn
     ...passedAtPacking(run, system),
     ...system.pack.walls.flatMap((wall, w) =>
       wall.layers.flatMap((layer, l) =>
-        layerWarnings(layer, `pack.walls[${w}].layers[${l}]`, system, walls[w], l),
+        layerWarnings(layer, { path: `pack.walls[${w}].layers[${l}]`, wall: walls[w], index: l }, system),
       ),
     ),
     ...sealWarnings(system, run),
     ...walls.flatMap((wall, w) => belowMeasurable(wall, w)),
-    ...system.pack.walls.flatMap((wall, w) => orientation(wall.layers, w, walls[w], run)),
+    ...system.pack.walls.flatMap((wall, w) => orientation(wall.layers, { index: w, answer: walls[w] }, run)),
     ...rateWarnings(system),
   ];
   const seen = new Set<string>();
@@ -58,10 +58,15 @@ function passedAtPacking(run: StorageRun, system: StorageSystem): EngineWarning[
 const celsius = (kelvin: number): string => `${Number((kelvin - ZERO_CELSIUS_K).toFixed(2))} °C`;
 const percent = (fraction: number): string => `${Number((fraction * 100).toPrecision(4))} %`;
 
+/** Where a warning belongs, in the description and in words. */
+interface Place {
+  path: string;
+  words: string;
+}
+
 function temperatureWarning(
   gas: GasInLayer,
-  path: string,
-  words: string,
+  { path, words }: Place,
   temperatures: number[],
 ): EngineWarning[] {
   const beyond = temperatures.filter((temperatureK) => isBeyondMeasured(gas, temperatureK));
@@ -100,10 +105,8 @@ function listed(temperatures: number[]): string {
 
 function layerWarnings(
   layer: Layer,
-  path: string,
+  { path, wall, index }: { path: string; wall: WallAnswer; index: number },
   system: StorageSystem,
-  wall: WallAnswer,
-  index: number,
 ): EngineWarning[] {
   const temperatures = [...new Set(system.legs.map((leg) => leg.temperatureK))];
   const faces = wall.legs.flatMap((leg) => leg.water.interface_relative_humidity.slice(index, index + 2));
@@ -111,9 +114,9 @@ function layerWarnings(
   for (const name of ['oxygen', 'water'] as const) {
     const gas = layer[name];
     if (!gas) continue;
-    const words = `${layer.name}, ${name}`;
-    warnings.push(...temperatureWarning(gas, `${path}.${name}`, words, temperatures));
-    warnings.push(...humidityWarning(gas, `${path}.${name}`, words, faces));
+    const place = { path: `${path}.${name}`, words: `${layer.name}, ${name}` };
+    warnings.push(...temperatureWarning(gas, place, temperatures));
+    warnings.push(...humidityWarning(gas, place, faces));
   }
   if (layer.defects) {
     warnings.push({
@@ -127,7 +130,7 @@ function layerWarnings(
   return warnings;
 }
 
-function humidityWarning(gas: GasInLayer, path: string, words: string, faces: number[]): EngineWarning[] {
+function humidityWarning(gas: GasInLayer, { path, words }: Place, faces: number[]): EngineWarning[] {
   const { curve } = gas;
   if (!curve) return [];
   const beyond = faces.filter((humidity) => isClearlyBeyond(curve.humidity, humidity));
@@ -160,10 +163,8 @@ function sealWarnings(system: StorageSystem, run: StorageRun): EngineWarning[] {
   return (['oxygen', 'water'] as const).flatMap((name) => {
     const gas = seal.film[name];
     if (!gas) return [];
-    return [
-      ...temperatureWarning(gas, `pack.seal.${name}`, `Seal, ${name}`, temperatures),
-      ...humidityWarning(gas, `pack.seal.${name}`, `Seal, ${name}`, faces),
-    ];
+    const place = { path: `pack.seal.${name}`, words: `Seal, ${name}` };
+    return [...temperatureWarning(gas, place, temperatures), ...humidityWarning(gas, place, faces)];
   });
 }
 
@@ -184,7 +185,11 @@ function belowMeasurable(wall: WallAnswer, index: number): EngineWarning[] {
   });
 }
 
-function orientation(layers: Layer[], index: number, wall: WallAnswer, run: StorageRun): EngineWarning[] {
+function orientation(
+  layers: Layer[],
+  { index, answer: wall }: { index: number; answer: WallAnswer },
+  run: StorageRun,
+): EngineWarning[] {
   if (!layers.some((layer) => layer.oxygen?.curve || layer.water?.curve)) return [];
   const turned = [...layers].reverse();
   let most = 0;

@@ -60,16 +60,18 @@ export function gasFromStated(stated: StatedGas & { kind: 'film' }): FilmGasDesc
 export function gasFromStated(stated: StatedGas & { kind: 'coating' }): CoatingGasDescription;
 export function gasFromStated(stated: StatedGas): FilmGasDescription | CoatingGasDescription;
 export function gasFromStated(stated: StatedGas): FilmGasDescription | CoatingGasDescription {
-  const gas = readChoice(stated.gas, 'gas', ['oxygen', 'water'] as const, 'Gas');
-  const layerKind = readChoice(stated.kind, 'kind', ['film', 'coating'] as const, 'Kind of layer');
+  const gas = readChoice(stated.gas, 'gas', { choices: ['oxygen', 'water'] as const, label: 'Gas' });
+  const layerKind = readChoice(stated.kind, 'kind', {
+    choices: ['film', 'coating'] as const,
+    label: 'Kind of layer',
+  });
   const unitKind = suitableKind(stated, gas, layerKind);
-  readNumber(
-    stated.value,
-    'value',
-    { min: 0, max: Number.MAX_VALUE, isMinExcluded: true },
-    { label: 'Value' },
-  );
-  readNumber(stated.temperature_C, 'temperature_C', REFERENCE_TEMPERATURE_C, {
+  readNumber(stated.value, 'value', {
+    range: { min: 0, max: Number.MAX_VALUE, isMinExcluded: true },
+    label: 'Value',
+  });
+  readNumber(stated.temperature_C, 'temperature_C', {
+    range: REFERENCE_TEMPERATURE_C,
     label: 'Temperature',
     unit: '°C',
   });
@@ -78,7 +80,8 @@ export function gasFromStated(stated: StatedGas): FilmGasDescription | CoatingGa
   const molar = isInKg ? inUnit / WATER_MOLAR_MASS : inUnit;
   const si = molar / drivingPressure(stated, unitKind);
   const isFilm = layerKind === 'film';
-  readNumber(si, 'value', isFilm ? PERMEABILITY_SI : PERMEANCE_SI, {
+  readNumber(si, 'value', {
+    range: isFilm ? PERMEABILITY_SI : PERMEANCE_SI,
     label: isFilm ? 'Permeability' : 'Permeance',
     unit: isFilm ? 'mol·m/(m²·s·Pa)' : 'mol/(m²·s·Pa)',
   });
@@ -128,7 +131,8 @@ function suitableKind(stated: StatedGas, gas: StatedGas['gas'], layerKind: State
 function drivingPressure(stated: StatedGas, unitKind: QuantityKind): number {
   if (unitKind === 'gas transmission rate') {
     const saturationPa = saturationPressureAtK(readTemperatureK(stated.temperature_C, 'temperature_C'));
-    const fraction = readNumber(stated.gas_mole_fraction_dry, 'gas_mole_fraction_dry', OXYGEN_FRACTION, {
+    const fraction = readNumber(stated.gas_mole_fraction_dry, 'gas_mole_fraction_dry', {
+      range: OXYGEN_FRACTION,
       label: 'Oxygen in the dry test gas (1 for pure oxygen, 0.2095 for air)',
     });
     return (

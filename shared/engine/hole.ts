@@ -16,11 +16,11 @@ export function diffusivityInAir(at20C: number, temperatureK: number): number {
 
 /** Resistance of a hole's own length of air [s·Pa/mol]: ℓRT/(D π r²). */
 export function holeResistance(
-  lengthM: number,
-  radiusM: number,
+  hole: { lengthM: number; radiusM: number },
   diffusivity: number,
   temperatureK: number,
 ): number {
+  const { lengthM, radiusM } = hole;
   return (lengthM * GAS_CONSTANT * temperatureK) / (diffusivity * Math.PI * radiusM * radiusM);
 }
 

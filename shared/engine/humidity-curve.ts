@@ -3,8 +3,10 @@ function meanExponential(x: number): number {
   return Math.abs(x) < 1e-5 ? 1 + x * (0.5 + x * (1 / 6)) : Math.expm1(x) / x;
 }
 
-/** What a walk through a curve leaves behind: the factor at its start and at its end. */
-export interface WalkEnds {
+/** A layer on a walk: its conductance beside its holes' (mol/(m²·s·Pa)), and the factors the walk leaves behind. */
+export interface Span {
+  own: number;
+  parallel: number;
   startFactor: number;
   endFactor: number;
 }
@@ -122,11 +124,12 @@ export class HumidityCurve {
    * Closed form per segment where nothing runs in parallel; else Newton's method, which is monotone here because the
    * left side is convex or concave within a segment. Always ends: the curve is flat beyond its last knot.
    */
-  riseFor(own: number, parallel: number, from: number, flux: number, ends: WalkEnds): number {
+  riseFor(span: Span, from: number, flux: number): number {
+    const { own, parallel } = span;
     const last = this.humidity.length - 1;
     let segment = this.segmentAt(from);
     let factor = this.inSegment(segment, from);
-    ends.startFactor = factor;
+    span.startFactor = factor;
     let h = from;
     let left = flux;
     let rise = 0;
@@ -137,7 +140,7 @@ export class HumidityCurve {
       if (left <= toNext) {
         const step = riseWithin({ own, parallel, factor, slope, toKnot }, left);
         const end = parallel === 0 ? factor + (slope * left) / own : 0;
-        ends.endFactor = end > 1e-3 * factor ? end : factor * Math.exp(slope * step);
+        span.endFactor = end > 1e-3 * factor ? end : factor * Math.exp(slope * step);
         return rise + step;
       }
       left -= toNext;
@@ -146,7 +149,7 @@ export class HumidityCurve {
       h = this.humidity[segment];
       factor = this.factor[segment];
     }
-    ends.endFactor = factor;
+    span.endFactor = factor;
     return rise + left / (own * factor + parallel);
   }
 }

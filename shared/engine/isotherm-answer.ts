@@ -26,7 +26,11 @@ export function isothermActivity(isotherm: IsothermDescription, moisture: number
   const read = readIsotherm(isotherm, 'isotherm');
   return moisture.map((value, i) =>
     read.activity(
-      readNumber(value, `moisture_g_per_g[${i}]`, MOISTURE_G_PER_G, { label: 'Moisture', unit: 'g/g' }),
+      readNumber(value, `moisture_g_per_g[${i}]`, {
+        range: MOISTURE_G_PER_G,
+        label: 'Moisture',
+        unit: 'g/g',
+      }),
     ),
   );
 }

@@ -9,7 +9,16 @@ export interface OxygenReport {
   absorberMol: Float64Array;
 }
 
+/** Oxygen in headspace and food, mol. */
+interface Contents {
+  headspaceMol: number;
+  uptakeMol: number;
+}
+
+/** Own constants: an import is looked up anew at every use, which inner loops feel. */
+const LAST = DEGREE;
 const COUNT = DEGREE + 1;
+const SLOPES = DIFFERENTIATION;
 
 /**
  * Oxygen in headspace, food and absorber [mol], advanced over pieces of a leg.
@@ -48,7 +57,7 @@ export class OxygenStore {
   private readonly flowIntegral = new Float64Array(COUNT + 1);
   private readonly content = new Float64Array(COUNT);
   private readonly contentCoefficients = new Float64Array(COUNT);
-  private readonly matrix = new Float64Array(DEGREE * (DEGREE + 1));
+  private readonly matrix = new Float64Array(LAST * COUNT);
 
   constructor(system: StorageSystem, atFirstLeg: LegConditions) {
     this.mode = system.food.oxygenMode;
@@ -136,10 +145,8 @@ export class OxygenStore {
       this.exhaustedAtS = from;
       if (!(duration > 0)) return;
     }
-    const headspace = this.headspaceMol;
-    const uptake = this.uptakeMol;
-    const after = (seconds: number): { headspaceMol: number; uptakeMol: number } =>
-      this.afterConstant(conductance, headspace, uptake, seconds);
+    const start = { headspaceMol: this.headspaceMol, uptakeMol: this.uptakeMol };
+    const after = (seconds: number): Contents => this.afterConstant(conductance, start, seconds);
     const end = after(duration);
     if (
       this.uptakeLimit !== undefined &&
@@ -162,12 +169,8 @@ export class OxygenStore {
   }
 
   /** Headspace and uptake [mol] after `seconds` of constant conductance, absorber aside. Closed forms. */
-  private afterConstant(
-    conductance: number,
-    headspace: number,
-    uptake: number,
-    seconds: number,
-  ): { headspaceMol: number; uptakeMol: number } {
+  private afterConstant(conductance: number, start: Contents, seconds: number): Contents {
+    const { headspaceMol: headspace, uptakeMol: uptake } = start;
     const { outsideOxygenPa, reactionSi, pressurePerMol } = this.inLeg();
     if (this.mode === 'at_once') {
       return { headspaceMol: 0, uptakeMol: uptake + conductance * outsideOxygenPa * seconds };
@@ -218,6 +221,17 @@ export class OxygenStore {
     const scale = this.passedMol + Math.abs(valueAt(this.flowIntegral, 1));
     const flowError = scale > 0 ? openEnd(this.flowCoefficients) / (tolerance * scale) : 0;
     return Math.max(flowError, contentError);
+  }
+
+  /**
+   * How much a relative error in a step's oxygen weighs in what passed so far, or in what the headspace holds;
+   * `admittanceS` is ∫K dt of the step, mol/Pa.
+   */
+  shareOf(admittanceS: number): number {
+    const stepMol = admittanceS * this.inLeg().outsideOxygenPa;
+    if (!(stepMol > 0)) return 0;
+    const held = this.hasHeadspace && this.mode !== 'at_once' ? this.headspaceMol : Infinity;
+    return stepMol / (Math.min(this.passedMol, held) + stepMol);
   }
 
   /** Where, up to x, the absorber is used up, and with it the step must end; x if it is not. */
@@ -304,18 +318,18 @@ export class OxygenStore {
   /** dn/dx = pace·(K p_out − (K + k m)(RT/V) n) at every node but the first. */
   private collocate(step: MarchStep): void {
     const { outsideOxygenPa, reactionSi, pressurePerMol } = this.inLeg();
-    const width = DEGREE + 1;
-    for (let k = 1; k <= DEGREE; k++) {
+    const width = COUNT;
+    for (let k = 1; k <= LAST; k++) {
       const row = (k - 1) * width;
-      for (let j = 1; j <= DEGREE; j++) this.matrix[row + j - 1] = DIFFERENTIATION[k * COUNT + j];
+      for (let j = 1; j <= LAST; j++) this.matrix[row + j - 1] = SLOPES[k * COUNT + j];
       const conductance = step.oxygen[k];
       this.matrix[row + k - 1] += step.pace[k] * (conductance + reactionSi) * pressurePerMol;
-      this.matrix[row + DEGREE] =
-        step.pace[k] * conductance * outsideOxygenPa - DIFFERENTIATION[k * COUNT] * this.headspaceMol;
+      this.matrix[row + LAST] =
+        step.pace[k] * conductance * outsideOxygenPa - SLOPES[k * COUNT] * this.headspaceMol;
     }
-    solveDense(this.matrix, DEGREE);
+    solveDense(this.matrix, LAST);
     this.content[0] = this.headspaceMol;
-    for (let k = 1; k <= DEGREE; k++) this.content[k] = this.matrix[(k - 1) * width + DEGREE];
+    for (let k = 1; k <= LAST; k++) this.content[k] = this.matrix[(k - 1) * width + LAST];
   }
 
   private headspaceLimitMol(): number | null {

@@ -47,10 +47,10 @@ export class PackAtTemperature {
   oxygen = 0;
   private isConstantKnown = false;
 
-  constructor(pack: Pack, temperatureK: number) {
-    this.walls = pack.walls.map((wall) => new WallAtTemperature(wall.layers, temperatureK));
+  constructor(pack: Pack, temperatureK: number, fluxTolerance = 0) {
+    this.walls = pack.walls.map((wall) => new WallAtTemperature(wall.layers, temperatureK, fluxTolerance));
     this.areas = Float64Array.from(pack.walls, (wall) => wall.areaM2);
-    this.seal = pack.seal ? new WallAtTemperature([pack.seal.film], temperatureK) : null;
+    this.seal = pack.seal ? new WallAtTemperature([pack.seal.film], temperatureK, fluxTolerance) : null;
     this.sealAreaM2 = pack.seal ? pack.seal.areaM2 : 0;
     const leaks = pack.leaks ?? { count: 0, lengthM: 1, diameterM: 1 };
     this.leaksOxygen = channelConductance(

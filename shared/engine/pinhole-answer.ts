@@ -48,22 +48,25 @@ export interface PinholeAnswer {
  * its neighbours at 1 to 11 % open area. Errors: InputError. Source: Prins & Hermans 1959.
  */
 export function pinhole(description: PinholeDescription): PinholeAnswer {
-  const gas = readChoice(description.gas, 'gas', ['oxygen', 'water'] as const, 'Gas');
+  const gas = readChoice(description.gas, 'gas', { choices: ['oxygen', 'water'] as const, label: 'Gas' });
   const temperatureK = readTemperatureK(description.temperature_C, 'temperature_C');
   const radiusM =
     0.5e-6 *
-    readNumber(description.hole_diameter_um, 'hole_diameter_um', HOLE_DIAMETER_UM, {
+    readNumber(description.hole_diameter_um, 'hole_diameter_um', {
+      range: HOLE_DIAMETER_UM,
       label: 'Diameter',
       unit: 'µm',
     });
   const metalM =
     1e-6 *
-    readOptional(description.metal_thickness_um, 'metal_thickness_um', COATING_THICKNESS_UM, {
+    readOptional(description.metal_thickness_um, 'metal_thickness_um', {
+      range: COATING_THICKNESS_UM,
       label: 'Metal thickness',
       unit: 'µm',
       otherwise: 0,
     });
-  const density = readNumber(description.density_per_m2, 'density_per_m2', DEFECT_DENSITY_PER_M2, {
+  const density = readNumber(description.density_per_m2, 'density_per_m2', {
+    range: DEFECT_DENSITY_PER_M2,
     label: 'Pinholes',
     unit: 'per m²',
   });
@@ -73,21 +76,21 @@ export function pinhole(description: PinholeDescription): PinholeAnswer {
     const cover = readObject<CoverDescription>(value, path, 'Cover');
     const thicknessM =
       1e-6 *
-      readNumber(cover.thickness_um, `${path}.thickness_um`, THICKNESS_UM, {
+      readNumber(cover.thickness_um, `${path}.thickness_um`, {
+        range: THICKNESS_UM,
         label: 'Thickness',
         unit: 'µm',
       });
     const permeability = readNumber(
       cover.permeability_mol_m_per_m2_s_Pa,
       `${path}.permeability_mol_m_per_m2_s_Pa`,
-      PERMEABILITY_SI,
-      { label: 'Permeability', unit: 'mol·m/(m²·s·Pa)' },
+      { range: PERMEABILITY_SI, label: 'Permeability', unit: 'mol·m/(m²·s·Pa)' },
     );
     return coveredSideResistance(thicknessM / permeability, thicknessM, radiusM);
   };
   const outside = side(description.outside_cover, 'outside_cover');
   const inside = side(description.inside_cover, 'inside_cover');
-  const hole = holeResistance(metalM, radiusM, diffusivity, temperatureK);
+  const hole = holeResistance({ lengthM: metalM, radiusM }, diffusivity, temperatureK);
   const conductance = 1 / (outside + hole + inside);
   return {
     outside_resistance_s_Pa_per_mol: outside,

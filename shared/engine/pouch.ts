@@ -29,9 +29,9 @@ export interface PouchArea {
 export function pouchArea(pouch: PouchDescription): PouchArea {
   const words = (label: string): { label: string; unit: string } => ({ label, unit: 'mm' });
   const edge = (key: keyof PouchDescription, label: string): number =>
-    readOptional(pouch[key], key, { min: 0, max: LENGTH_MM.max }, { ...words(label), otherwise: 0 });
-  const width = readNumber(pouch.width_mm, 'width_mm', LENGTH_MM, words('Width'));
-  const height = readNumber(pouch.height_mm, 'height_mm', LENGTH_MM, words('Height'));
+    readOptional(pouch[key], key, { range: { min: 0, max: LENGTH_MM.max }, ...words(label), otherwise: 0 });
+  const width = readNumber(pouch.width_mm, 'width_mm', { range: LENGTH_MM, ...words('Width') });
+  const height = readNumber(pouch.height_mm, 'height_mm', { range: LENGTH_MM, ...words('Height') });
   const left = edge('seal_left_mm', 'Left seal');
   const right = edge('seal_right_mm', 'Right seal');
   const top = edge('seal_top_mm', 'Top seal');

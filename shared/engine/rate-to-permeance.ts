@@ -37,20 +37,23 @@ const RATE = { min: 0, max: 1e12 };
  * where the test has no difference. Cost: one saturation pressure.
  */
 export function rateToPermeance(rate: TransmissionRate): PermeanceFromRate {
-  const gas = readChoice(rate.gas, 'gas', ['oxygen', 'water'] as const, 'Gas');
+  const gas = readChoice(rate.gas, 'gas', { choices: ['oxygen', 'water'] as const, label: 'Gas' });
   const saturationPa = saturationPressureAtK(readTemperatureK(rate.temperature_C, 'temperature_C'));
   if (gas === 'oxygen' && rate.gas === 'oxygen') {
     const molar =
-      (readNumber(rate.rate_cm3_STP_per_m2_day, 'rate_cm3_STP_per_m2_day', RATE, {
+      (readNumber(rate.rate_cm3_STP_per_m2_day, 'rate_cm3_STP_per_m2_day', {
+        range: RATE,
         label: 'Oxygen transmission rate',
         unit: 'cm³(STP)/(m²·day)',
       }) *
         MOL_PER_CM3_STP) /
       DAY_S;
-    const fraction = readNumber(rate.oxygen_mole_fraction_dry, 'oxygen_mole_fraction_dry', OXYGEN_FRACTION, {
+    const fraction = readNumber(rate.oxygen_mole_fraction_dry, 'oxygen_mole_fraction_dry', {
+      range: OXYGEN_FRACTION,
       label: 'Oxygen in the dry test gas',
     });
-    const total = readOptional(rate.total_pressure_Pa, 'total_pressure_Pa', TOTAL_PRESSURE_PA, {
+    const total = readOptional(rate.total_pressure_Pa, 'total_pressure_Pa', {
+      range: TOTAL_PRESSURE_PA,
       label: 'Total pressure',
       unit: 'Pa',
       otherwise: ATMOSPHERE_PA,
@@ -61,7 +64,8 @@ export function rateToPermeance(rate: TransmissionRate): PermeanceFromRate {
   }
   if (rate.gas !== 'water') throw new InputError('gas', gas, 'Use oxygen or water.');
   const molar =
-    readNumber(rate.rate_g_per_m2_day, 'rate_g_per_m2_day', RATE, {
+    readNumber(rate.rate_g_per_m2_day, 'rate_g_per_m2_day', {
+      range: RATE,
       label: 'Water vapour transmission rate',
       unit: 'g/(m²·day)',
     }) /

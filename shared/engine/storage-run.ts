@@ -1,19 +1,31 @@
 import { WATER_MOLAR_MASS } from '../units';
-import { DEGREE, openEnd, whereReaches } from './chebyshev';
+import {
+  DEGREE,
+  fillFromFour,
+  fillFromTwo,
+  openEnd,
+  openEndOfFour,
+  openEndOfTwo,
+  whereReaches,
+} from './chebyshev';
 import { MarchStep } from './march-step';
 import { MoistureTracker } from './moisture-tracker';
 import { OxygenStore } from './oxygen-store';
 import { conditionsOf, type LegConditions, type StorageSystem } from './storage-system';
 
-/** Relative error a step may leave open, against time and oxygen passed since day 0. */
-const STEP_TOLERANCE = 1e-8;
-/** What the whole promises, relative in days. */
+/** What the whole promises, relative in days, unless less is asked for. */
 export const RELATIVE_TOLERANCE = 1e-6;
+/** What a step may leave open of that, against time and oxygen passed since day 0. */
+const STEP_SHARE = 1e-2;
+/** A parabola's remainder is judged by its last coefficient, so less of it is let through. */
+const PARABOLA_SHARE = 0.1;
+/** How far a wall's flux may be from balance, of the tolerance. */
+const FLUX_SHARE = 1e-4;
 /** Closer than this to the air outside, the food counts as at rest with it. */
 const AT_REST = 1e-12;
 /** Work that one answer may cost: conductances of the pack, and layers in them. Some seconds; then the run says so. */
-const MOST_EVALUATIONS = 1_000_000;
-const MOST_LAYER_EVALUATIONS = 15_000_000;
+const MOST_EVALUATIONS = 2_000_000;
+const MOST_LAYER_EVALUATIONS = 20_000_000;
 
 export interface LegStart {
   leg: number;
@@ -47,13 +59,19 @@ export interface StorageRun {
  * Moisture of a leg is one autonomous equation, m_dry dX/dt = M_w K_w p_sat (h_out − a), and a only ever nears h_out. So
  * ζ = ln(z_0/z), z = h_out − a, is taken as the independent variable: dt/dζ = m_dry X′(a)/(M_w p_sat K_w) is smooth and
  * never stiff, however near the food is to rest, and time becomes an integral. It is taken in steps of adaptive width by
- * Clenshaw–Curtis quadrature of degree 8 (chebyshev.ts); what the last two coefficients leave open decides a step. A
+ * Clenshaw–Curtis quadrature of degree 8 (chebyshev.ts); what the last two coefficients leave open decides a step.
+ * Its points are nested: short legs and gentle steps are content with those of degree 2 or 4. A
  * moisture limit is a known ζ; times are read from the integral's own polynomial. Oxygen rides on the same points
  * (oxygen-store.ts). Where nothing varies, closed forms take the whole leg.
- * Every leg begins anew. Cost: 8 pack conductances per step.
+ * Every leg begins anew; the run ends at the horizon, or as soon as no answer can change any more.
+ * Cost: 2 to 8 pack conductances per step.
  */
-export function runStorage(system: StorageSystem, firstLegsToSee: number): StorageRun {
-  return new Runner(system, firstLegsToSee).run();
+export function runStorage(
+  system: StorageSystem,
+  firstLegsToSee: number,
+  relativeTolerance: number = RELATIVE_TOLERANCE,
+): StorageRun {
+  return new Runner(system, firstLegsToSee, relativeTolerance).run();
 }
 
 class Runner {
@@ -70,14 +88,18 @@ class Runner {
   private readonly legStarts: LegStart[] = [];
   private readonly dryMassKg: number;
   private readonly mostEvaluations: number;
+  private readonly stepTolerance: number;
   private timeS = 0;
   private lastLeg = 0;
+  private begun = 0;
 
   constructor(
     private readonly system: StorageSystem,
     private readonly firstLegsToSee: number,
+    relativeTolerance: number,
   ) {
-    this.conditions = conditionsOf(system);
+    this.stepTolerance = STEP_SHARE * relativeTolerance;
+    this.conditions = conditionsOf(system, FLUX_SHARE * relativeTolerance);
     this.oxygen = new OxygenStore(system, this.conditions[0]);
     this.moisture = new MoistureTracker(system);
     const layers = system.pack.walls.reduce((sum, wall) => sum + wall.layers.length, 0);
@@ -87,16 +109,16 @@ class Runner {
 
   run(): StorageRun {
     const { legs, isRepeated, horizonS } = this.system;
-    let begun = 0;
     let endS = 0;
     while (this.timeS < horizonS) {
+      const { begun } = this;
       const index = isRepeated ? begun % legs.length : Math.min(begun, legs.length - 1);
       const isHeld = !isRepeated && index === legs.length - 1;
       endS = isHeld ? horizonS : Math.min(horizonS, endS + legs[index].durationS);
+      this.begun += 1;
       this.runLeg(index, begun, endS);
+      if (this.counters.isStepLimitReached || this.isAllKnown()) break;
       this.timeS = endS;
-      begun += 1;
-      if (this.counters.isStepLimitReached || this.isAllKnown(begun)) break;
     }
     this.oxygen.finish();
     this.moisture.finish();
@@ -115,10 +137,10 @@ class Runner {
   }
 
   /** True once no answer can change any more. */
-  private isAllKnown(begun: number): boolean {
+  private isAllKnown(): boolean {
     const { limits, legs, absorberMol } = this.system;
     return (
-      begun >= Math.min(this.firstLegsToSee, legs.length) &&
+      this.begun >= Math.min(this.firstLegsToSee, legs.length) &&
       (limits.oxygen_uptake_mg_per_kg === undefined || this.oxygen.uptakeReachedAtS !== null) &&
       (limits.headspace_oxygen_percent === undefined || this.oxygen.headspaceReachedAtS !== null) &&
       (limits.moisture_max_g_per_g === undefined || this.moisture.maxReachedAtS !== null) &&
@@ -147,7 +169,9 @@ class Runner {
         insideOxygenPa: this.oxygen.insidePressure(conditions.pack.oxygen),
       });
     }
-    while (this.timeS < endS && !this.counters.isStepLimitReached) this.runPiece(conditions, endS);
+    while (this.timeS < endS && !this.counters.isStepLimitReached && !this.isAllKnown()) {
+      this.runPiece(conditions, endS);
+    }
   }
 
   private runPiece(conditions: LegConditions, endS: number): void {
@@ -168,7 +192,7 @@ class Runner {
     const held = isotherm.moisture(inside);
     const isPinned =
       inside === 0 ? this.moisture.moisture < held : inside === 1 && this.moisture.moisture > held;
-    if (isPinned) this.slide(conditions, inside, held, endS);
+    if (isPinned) this.slide(conditions, { inside, held }, endS);
     else if (isotherm.isLinear && !pack.isWaterHumid && !pack.isOxygenHumid)
       this.decay(conditions, distance, endS);
     else this.march(conditions, distance, endS);
@@ -185,7 +209,11 @@ class Runner {
   }
 
   /** Moisture beyond what the isotherm gives at 0 or 1: activity is held there, so moisture changes evenly. */
-  private slide(conditions: LegConditions, inside: number, held: number, endS: number): void {
+  private slide(
+    conditions: LegConditions,
+    { inside, held }: { inside: number; held: number },
+    endS: number,
+  ): void {
     const { pack, humidity, saturationPa } = conditions;
     const startS = this.timeS;
     const start = this.moisture.moisture;
@@ -236,15 +264,16 @@ class Runner {
       step.width = Math.min(width, Math.log(Math.abs(step.startDistance) / AT_REST) + 1e-3);
       step.pace[0] = firstPace * step.width;
       step.oxygen[0] = firstOxygen;
-      for (let node = 1; node <= DEGREE; node++) {
-        step.pace[node] = this.paceAt(conditions, step.nodeDistance(node)) * step.width;
-        step.oxygen[node] = pack.oxygen;
-      }
+      const degree = this.sample(conditions);
       const lastPace = step.pace[DEGREE] / step.width;
       const lastOxygen = step.oxygen[DEGREE];
       step.settleTime();
-      let error = openEnd(step.paceCoefficients) / (STEP_TOLERANCE * (this.timeS + step.timeAt(1)));
-      if (pack.isOxygenHumid) error = Math.max(error, this.oxygen.prepareStep(step, STEP_TOLERANCE));
+      let error = 0;
+      if (degree === DEGREE) {
+        error = openEnd(step.paceCoefficients) / (this.stepTolerance * (this.timeS + step.timeAt(1)));
+      }
+      if (pack.isOxygenHumid) error = Math.max(error, this.oxygen.prepareStep(step, this.stepTolerance));
+      // A step that was content with few points may grow: should it grow too far, more points are there to be asked.
       const change = Math.min(4, Math.max(0.15, 0.9 * error ** (-1 / DEGREE)));
       if (error > 1 && step.width > 1e-13) {
         counters.rejectedSteps += 1;
@@ -257,12 +286,13 @@ class Runner {
       let x = isLast ? whereReaches((at) => step.timeAt(at), remaining) : 1;
       if (pack.isOxygenHumid) {
         const regimeX = this.oxygen.regimeEnd(x);
-        this.take(step, regimeX, pack, isLast && regimeX === x ? endS : this.timeS + step.timeAt(regimeX));
+        this.take(step, regimeX, isLast && regimeX === x ? endS : this.timeS + step.timeAt(regimeX));
         x = regimeX;
       } else {
-        this.take(step, x, pack, isLast ? endS : this.timeS + step.timeAt(x));
+        this.take(step, x, isLast ? endS : this.timeS + step.timeAt(x));
       }
       step.startDistance = step.distanceAt(x);
+      if (this.isAllKnown()) return;
       if (x === 1) {
         firstPace = lastPace;
         firstOxygen = lastOxygen;
@@ -273,6 +303,53 @@ class Runner {
       width = Math.min(step.width * change, (1.05 * (endS - this.timeS)) / firstPace);
     }
     if (this.timeS < endS) this.rest(conditions, this.insideHumidity(), endS);
+  }
+
+  /**
+   * Fills the step's points, asking the pack at as few as the tolerance allows; gives the degree that was enough. For
+   * the highest it is not yet known whether it is: the step's own coefficients tell.
+   */
+  private sample(conditions: LegConditions): number {
+    const { pace, oxygen } = this.step;
+    const { isOxygenHumid } = conditions.pack;
+    this.sampleAt(conditions, 8);
+    this.sampleAt(conditions, 4);
+    let open = this.openPart(openEndOfTwo(pace), isOxygenHumid ? openEndOfTwo(oxygen) : 0);
+    if (open <= PARABOLA_SHARE) {
+      fillFromTwo(pace);
+      fillFromTwo(oxygen);
+      return 2;
+    }
+    this.sampleAt(conditions, 2);
+    this.sampleAt(conditions, 6);
+    open = this.openPart(openEndOfFour(pace), isOxygenHumid ? openEndOfFour(oxygen) : 0);
+    if (open <= 1) {
+      fillFromFour(pace);
+      fillFromFour(oxygen);
+      return 4;
+    }
+    this.sampleAt(conditions, 7);
+    this.sampleAt(conditions, 5);
+    this.sampleAt(conditions, 3);
+    this.sampleAt(conditions, 1);
+    return DEGREE;
+  }
+
+  private sampleAt(conditions: LegConditions, node: number): void {
+    const { step } = this;
+    step.pace[node] = this.paceAt(conditions, step.nodeDistance(node)) * step.width;
+    step.oxygen[node] = conditions.pack.oxygen;
+  }
+
+  /** What is left open of time and oxygen by a few points, over the tolerance; from node 0, 4 and 8. */
+  private openPart(openPace: number, openOxygen: number): number {
+    const { pace, oxygen } = this.step;
+    const stepS = (pace[0] + 4 * pace[4] + pace[8]) / 6;
+    const ofTime = openPace / (this.timeS + stepS);
+    if (openOxygen === 0) return ofTime / this.stepTolerance;
+    const mean = (oxygen[0] + 4 * oxygen[4] + oxygen[8]) / 6;
+    const ofOxygen = (openOxygen / mean + openPace / stepS) * this.oxygen.shareOf(mean * stepS);
+    return Math.max(ofTime, ofOxygen) / this.stepTolerance;
   }
 
   /** dt/dζ [s] at a distance from rest; leaves the pack's conductances behind. */
@@ -287,11 +364,11 @@ class Runner {
   }
 
   /** Books a step up to x, which ends at `untilS`. */
-  private take(step: MarchStep, x: number, pack: LegConditions['pack'], untilS: number): void {
+  private take(step: MarchStep, x: number, untilS: number): void {
     const { isotherm } = this.system.food;
     if (isotherm === null) return;
     const startS = this.timeS;
-    const humidity = this.conditions[this.lastLeg].humidity;
+    const { humidity, pack } = this.conditions[this.lastLeg];
     const moistureOf = (distance: number): number =>
       isotherm.moisture(Math.min(1, Math.max(0, humidity - distance)));
     if (pack.isOxygenHumid) this.oxygen.commitStep(step, x, startS);

@@ -59,14 +59,14 @@ export interface LegConditions {
   pressurePerMol: number;
 }
 
-/** Conditions of every leg; legs at one temperature share their pack. */
-export function conditionsOf(system: StorageSystem): LegConditions[] {
+/** Conditions of every leg; legs at one temperature share their pack. `fluxTolerance`: see WallAtTemperature. */
+export function conditionsOf(system: StorageSystem, fluxTolerance = 0): LegConditions[] {
   const packs = new Map<number, PackAtTemperature>();
   return system.legs.map((leg) => {
     const { temperatureK, humidity } = leg;
     let pack = packs.get(temperatureK);
     if (!pack) {
-      pack = new PackAtTemperature(system.pack, temperatureK);
+      pack = new PackAtTemperature(system.pack, temperatureK, fluxTolerance);
       packs.set(temperatureK, pack);
     }
     const { food } = system;

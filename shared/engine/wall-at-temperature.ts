@@ -6,22 +6,26 @@ import {
   OXYGEN_IN_AIR_20C,
   WATER_IN_AIR_20C,
 } from './hole';
-import type { HumidityCurve, WalkEnds } from './humidity-curve';
+import type { HumidityCurve, Span } from './humidity-curve';
 import { permeanceAtTemperature, type Layer } from './layer';
+
+type Gas = 'oxygen' | 'water';
+
+/** One side of a hole: the layers that cover it, none where it is bare. */
+interface HoleSide {
+  cover: number[];
+  thicknessM: number;
+  radiusM: number;
+  bareResistance: Record<Gas, number>;
+}
 
 /** A layer whose holes are open, with the layers that cover them on either side. */
 interface PiercedLayer {
   index: number;
   densityPerM2: number;
-  radiusM: number;
-  holeOxygen: number;
-  holeWater: number;
-  bareOxygen: number;
-  bareWater: number;
-  outsideCover: number[];
-  insideCover: number[];
-  outsideThicknessM: number;
-  insideThicknessM: number;
+  holeResistance: Record<Gas, number>;
+  outside: HoleSide;
+  inside: HoleSide;
 }
 
 /** Below this span a layer counts as lying at one humidity. */
@@ -71,43 +75,73 @@ export class WallAtTemperature {
   private readonly pierced: PiercedLayer[];
   private readonly hasWaterCurve: boolean;
   private readonly doCoversFeelHumidity: boolean;
-  private readonly ends: WalkEnds = { startFactor: 1, endFactor: 1 };
+  private readonly span: Span = { own: 0, parallel: 0, startFactor: 1, endFactor: 1 };
+  /** The flux is taken as found once a correction is smaller than this, relatively; 0: to the last digit. */
+  private readonly fluxTolerance: number;
+  /** Σ of the layers' resistances at their curves' lowest and highest factors: what the flux can be at most and least. */
+  private mostResistance = 0;
+  private leastResistance = 0;
   private riseSlope = 0;
+  /** The last two solutions, from which the next is guessed. */
   private lastPermeance = 0;
+  private lastDriest = 0;
+  private lastSpan = 0;
+  private permeancePerSpan = 0;
 
-  constructor(layers: readonly Layer[], temperatureK: number) {
+  constructor(layers: readonly Layer[], temperatureK: number, fluxTolerance = 0) {
     const count = layers.length;
     this.count = count;
     this.temperatureK = temperatureK;
-    this.rise = new Float64Array(count);
-    this.driestHumidity = new Float64Array(count);
-    this.waterResistance = new Float64Array(count);
-    this.oxygenResistance = new Float64Array(count);
-    this.ownWater = new Float64Array(count);
-    this.ownOxygen = new Float64Array(count);
-    this.holesWater = new Float64Array(count);
-    this.holesOxygen = new Float64Array(count);
-    this.waterCurves = layers.map((layer) => layer.water?.curve ?? null);
-    this.oxygenCurves = layers.map((layer) => layer.oxygen?.curve ?? null);
-    this.quotients = layers.map((layer) => layer.waterOverOxygen);
-    layers.forEach((layer, i) => {
-      if (layer.water) this.ownWater[i] = permeanceAtTemperature(layer.water, temperatureK);
-      if (layer.oxygen) this.ownOxygen[i] = permeanceAtTemperature(layer.oxygen, temperatureK);
-    });
-    this.isTight = layers.some((layer) => layer.kind === 'foil' && !layer.defects);
-    this.hasWaterCurve = this.waterCurves.some((curve) => curve !== null);
-    this.pierced = layers.flatMap((layer, i) => (layer.defects ? [pierce(layers, i, temperatureK)] : []));
-    const coverOf = (curves: (HumidityCurve | null)[]): boolean =>
-      this.pierced.some((hole) =>
-        [...hole.outsideCover, ...hole.insideCover].some((i) => curves[i] !== null),
-      );
-    const isWaterCovered = coverOf(this.waterCurves);
-    const isOxygenCovered = coverOf(this.oxygenCurves);
+    this.fluxTolerance = fluxTolerance;
+    const numbers = new Float64Array(8 * count);
+    const part = (k: number): Float64Array => numbers.subarray(k * count, (k + 1) * count);
+    this.rise = part(0);
+    this.driestHumidity = part(1);
+    this.waterResistance = part(2);
+    this.oxygenResistance = part(3);
+    this.ownWater = part(4);
+    this.ownOxygen = part(5);
+    this.holesWater = part(6);
+    this.holesOxygen = part(7);
+    this.waterCurves = [];
+    this.oxygenCurves = [];
+    this.quotients = [];
+    this.pierced = [];
+    let isTight = false;
+    let hasWaterCurve = false;
+    let hasOxygenCurve = false;
+    for (let i = 0; i < count; i++) {
+      const layer = layers[i];
+      const { water, oxygen } = layer;
+      const waterCurve = water ? water.curve : null;
+      const oxygenCurve = oxygen ? oxygen.curve : null;
+      this.waterCurves.push(waterCurve);
+      this.oxygenCurves.push(oxygenCurve);
+      this.quotients.push(layer.waterOverOxygen);
+      if (waterCurve) hasWaterCurve = true;
+      if (oxygenCurve) hasOxygenCurve = true;
+      if (water) this.ownWater[i] = permeanceAtTemperature(water, temperatureK);
+      if (oxygen) this.ownOxygen[i] = permeanceAtTemperature(oxygen, temperatureK);
+      if (layer.defects) this.pierced.push(pierce(layers, i, temperatureK));
+      else if (layer.kind === 'foil') isTight = true;
+    }
+    this.isTight = isTight;
+    this.hasWaterCurve = hasWaterCurve;
+    const isWaterCovered = this.isCurveOverHole(this.waterCurves);
+    const isOxygenCovered = this.isCurveOverHole(this.oxygenCurves);
     this.doCoversFeelHumidity = isWaterCovered || isOxygenCovered;
-    this.isWaterHumid = !this.isTight && (this.hasWaterCurve || isWaterCovered);
-    this.isOxygenHumid =
-      !this.isTight && (isOxygenCovered || this.oxygenCurves.some((curve) => curve !== null));
+    this.isWaterHumid = !isTight && (hasWaterCurve || isWaterCovered);
+    this.isOxygenHumid = !isTight && (isOxygenCovered || hasOxygenCurve);
     this.updateHoles(0, 0);
+  }
+
+  private isCurveOverHole(curves: (HumidityCurve | null)[]): boolean {
+    for (const { outside, inside } of this.pierced) {
+      if (outside.cover.some((i) => curves[i] !== null) || inside.cover.some((i) => curves[i] !== null)) {
+        return true;
+      }
+    }
+    return false;
   }
 
   /**
@@ -146,32 +180,50 @@ export class WallAtTemperature {
 
   /** Flux over saturation pressure [mol/(m²·s·Pa)] at which the layers' rises add to `span`. */
   private fluxOver(span: number, driest: number, isDryInside: boolean): number {
-    let low = 0;
-    let high = 0;
-    for (let i = 0; i < this.count; i++) {
-      const curve = this.waterCurves[i];
-      low += 1 / (this.ownWater[i] * (curve ? curve.minFactor : 1) + this.holesWater[i]);
-      high += 1 / (this.ownWater[i] * (curve ? curve.maxFactor : 1) + this.holesWater[i]);
+    if (!this.hasWaterCurve) {
+      const flux = span / this.leastResistance;
+      this.walk(flux, driest, isDryInside);
+      for (let i = 0; i < this.count; i++) this.waterResistance[i] = this.rise[i] / flux;
+      return flux;
     }
-    let lowFlux = (span / low) * (1 - 1e-12);
-    let highFlux = (span / high) * (1 + 1e-12);
-    let flux = this.lastPermeance * span;
-    if (!(flux > lowFlux && flux < highFlux)) flux = Math.sqrt(lowFlux) * Math.sqrt(highFlux);
+    let lowFlux = (span / this.mostResistance) * (1 - 1e-12);
+    let highFlux = (span / this.leastResistance) * (1 + 1e-12);
+    let flux = this.guess(span) * span;
+    if (!(flux > lowFlux && flux < highFlux)) {
+      flux = this.lastPermeance * span;
+      if (!(flux > lowFlux && flux < highFlux)) flux = Math.sqrt(lowFlux) * Math.sqrt(highFlux);
+    }
     for (let iteration = 0; iteration < 200; iteration++) {
       const total = this.walk(flux, driest, isDryInside);
       const ratio = total / span;
       if (ratio > 1) highFlux = flux;
       else lowFlux = flux;
-      if (Math.abs(ratio - 1) < 2e-15 || !this.hasWaterCurve) break;
-      const next = flux * Math.exp((-Math.log(ratio) * total) / (flux * this.riseSlope));
+      if (Math.abs(ratio - 1) < 2e-15) break;
+      const correction = (-Math.log(ratio) * total) / (flux * this.riseSlope);
+      const next = flux * Math.exp(correction);
       if (Math.abs(next - flux) <= 1e-15 * flux) break;
-      flux = next > lowFlux && next < highFlux ? next : Math.sqrt(lowFlux) * Math.sqrt(highFlux);
+      const isWithin = next > lowFlux && next < highFlux;
+      flux = isWithin ? next : Math.sqrt(lowFlux) * Math.sqrt(highFlux);
+      // Newton's method doubles the digits: what is left after a correction this small is its square.
+      if (isWithin && Math.abs(correction) <= this.fluxTolerance) break;
       if (highFlux - lowFlux <= 2e-16 * highFlux) break;
     }
-    if (!this.hasWaterCurve) flux = span / low;
     for (let i = 0; i < this.count; i++) this.waterResistance[i] = this.rise[i] / flux;
-    this.lastPermeance = flux / span;
+    const permeance = flux / span;
+    this.permeancePerSpan =
+      driest === this.lastDriest || driest + span === this.lastDriest + this.lastSpan
+        ? (permeance - this.lastPermeance) / (span - this.lastSpan)
+        : 0;
+    this.lastPermeance = permeance;
+    this.lastDriest = driest;
+    this.lastSpan = span;
     return flux;
+  }
+
+  /** Permeance to begin from: the last, or along the line through the last two where one face stood still. */
+  private guess(span: number): number {
+    const moved = this.permeancePerSpan * (span - this.lastSpan);
+    return Number.isFinite(moved) ? this.lastPermeance + moved : this.lastPermeance;
   }
 
   /** Total rise for a flux; leaves each layer's span, and the derivative of the total by the flux in riseSlope. */
@@ -190,8 +242,10 @@ export class WallAtTemperature {
         rise = flux * resistance;
         slope += resistance;
       } else {
-        rise = curve.riseFor(own, holes, from, flux, this.ends);
-        slope = (slope * (own * this.ends.startFactor + holes) + 1) / (own * this.ends.endFactor + holes);
+        this.span.own = own;
+        this.span.parallel = holes;
+        rise = curve.riseFor(this.span, from, flux);
+        slope = (slope * (own * this.span.startFactor + holes) + 1) / (own * this.span.endFactor + holes);
       }
       this.driestHumidity[i] = from;
       this.rise[i] = rise;
@@ -232,36 +286,44 @@ export class WallAtTemperature {
   /** n·G of every pierced layer; covers are taken at the humidity of the face they lie towards. */
   private updateHoles(outside: number, inside: number): void {
     for (const hole of this.pierced) {
-      const area = hole.densityPerM2;
       this.holesWater[hole.index] =
-        area /
-        (this.sideResistance(hole.outsideCover, hole.outsideThicknessM, hole, outside, true) +
-          hole.holeWater +
-          this.sideResistance(hole.insideCover, hole.insideThicknessM, hole, inside, true));
+        hole.densityPerM2 / this.holeResistance(hole, 'water', { outside, inside });
       this.holesOxygen[hole.index] =
-        area /
-        (this.sideResistance(hole.outsideCover, hole.outsideThicknessM, hole, outside, false) +
-          hole.holeOxygen +
-          this.sideResistance(hole.insideCover, hole.insideThicknessM, hole, inside, false));
+        hole.densityPerM2 / this.holeResistance(hole, 'oxygen', { outside, inside });
     }
+    let most = 0;
+    let least = 0;
+    for (let i = 0; i < this.count; i++) {
+      const curve = this.waterCurves[i];
+      most += 1 / (this.ownWater[i] * (curve ? curve.minFactor : 1) + this.holesWater[i]);
+      least += 1 / (this.ownWater[i] * (curve ? curve.maxFactor : 1) + this.holesWater[i]);
+    }
+    this.mostResistance = most;
+    this.leastResistance = least;
   }
 
-  private sideResistance(
-    cover: number[],
-    thicknessM: number,
+  private holeResistance(
     hole: PiercedLayer,
-    humidity: number,
-    isWater: boolean,
+    gas: Gas,
+    humidity: { outside: number; inside: number },
   ): number {
-    if (cover.length === 0) return isWater ? hole.bareWater : hole.bareOxygen;
-    const own = isWater ? this.ownWater : this.ownOxygen;
-    const curves = isWater ? this.waterCurves : this.oxygenCurves;
+    return (
+      this.sideResistance(hole.outside, gas, humidity.outside) +
+      hole.holeResistance[gas] +
+      this.sideResistance(hole.inside, gas, humidity.inside)
+    );
+  }
+
+  private sideResistance(side: HoleSide, gas: Gas, humidity: number): number {
+    if (side.cover.length === 0) return side.bareResistance[gas];
+    const own = gas === 'water' ? this.ownWater : this.ownOxygen;
+    const curves = gas === 'water' ? this.waterCurves : this.oxygenCurves;
     let sum = 0;
-    for (let k = 0; k < cover.length; k++) {
-      const curve = curves[cover[k]];
-      sum += 1 / (own[cover[k]] * (curve ? curve.at(humidity) : 1));
+    for (const index of side.cover) {
+      const curve = curves[index];
+      sum += 1 / (own[index] * (curve ? curve.at(humidity) : 1));
     }
-    return coveredSideResistance(sum, thicknessM, hole.radiusM);
+    return coveredSideResistance(sum, side.thicknessM, side.radiusM);
   }
 }
 
@@ -277,22 +339,27 @@ function pierce(layers: readonly Layer[], index: number, temperatureK: number): 
     }
     return cover;
   };
-  const outsideCover = collect(-1);
-  const insideCover = collect(1);
-  const thickness = (cover: number[]): number => cover.reduce((sum, i) => sum + layers[i].thicknessM, 0);
   const oxygenInAir = diffusivityInAir(OXYGEN_IN_AIR_20C, temperatureK);
   const waterInAir = diffusivityInAir(WATER_IN_AIR_20C, temperatureK);
+  const { densityPerM2, radiusM } = defects;
+  const sideOf = (cover: number[]): HoleSide => ({
+    cover,
+    thicknessM: cover.reduce((sum, i) => sum + layers[i].thicknessM, 0),
+    radiusM,
+    bareResistance: {
+      oxygen: bareSideResistance(radiusM, oxygenInAir, temperatureK),
+      water: bareSideResistance(radiusM, waterInAir, temperatureK),
+    },
+  });
+  const hole = { lengthM: layer.thicknessM, radiusM };
   return {
     index,
-    densityPerM2: defects.densityPerM2,
-    radiusM: defects.radiusM,
-    holeOxygen: holeResistance(layer.thicknessM, defects.radiusM, oxygenInAir, temperatureK),
-    holeWater: holeResistance(layer.thicknessM, defects.radiusM, waterInAir, temperatureK),
-    bareOxygen: bareSideResistance(defects.radiusM, oxygenInAir, temperatureK),
-    bareWater: bareSideResistance(defects.radiusM, waterInAir, temperatureK),
-    outsideCover,
-    insideCover,
-    outsideThicknessM: thickness(outsideCover),
-    insideThicknessM: thickness(insideCover),
+    densityPerM2,
+    holeResistance: {
+      oxygen: holeResistance(hole, oxygenInAir, temperatureK),
+      water: holeResistance(hole, waterInAir, temperatureK),
+    },
+    outside: sideOf(collect(-1)),
+    inside: sideOf(collect(1)),
   };
 }

@@ -26,19 +26,18 @@ export interface TestConditions {
 /** Reads a test. Errors: InputError, also for a water test without a difference. */
 export function readTest(value: unknown, path: string): TestConditions {
   const test = readObject<TransmissionTest>(value, path, 'Test');
-  const gas = readChoice(test.gas, `${path}.gas`, ['oxygen', 'water'] as const, 'Gas of a test');
+  const gas = readChoice(test.gas, `${path}.gas`, {
+    choices: ['oxygen', 'water'] as const,
+    label: 'Gas of a test',
+  });
   const temperatureK = readTemperatureK(test.temperature_C, `${path}.temperature_C`);
   if (test.gas === 'oxygen') {
     const humidityOutside = readHumidity(test.relative_humidity_outside, `${path}.relative_humidity_outside`);
     const humidityInside = readHumidity(test.relative_humidity_inside, `${path}.relative_humidity_inside`);
-    const fraction = readNumber(
-      test.oxygen_mole_fraction_dry,
-      `${path}.oxygen_mole_fraction_dry`,
-      OXYGEN_FRACTION,
-      {
-        label: 'Oxygen in the dry test gas',
-      },
-    );
+    const fraction = readNumber(test.oxygen_mole_fraction_dry, `${path}.oxygen_mole_fraction_dry`, {
+      range: OXYGEN_FRACTION,
+      label: 'Oxygen in the dry test gas',
+    });
     const oxygenOutsidePa =
       fraction * (ATMOSPHERE_PA - humidityOutside * saturationPressureAtK(temperatureK));
     return { gas, temperatureK, humidityOutside, humidityInside, oxygenOutsidePa };
@@ -60,12 +59,10 @@ export function readTest(value: unknown, path: string): TestConditions {
       `The dry side (${low}) must be drier than the moist side (${high}); exchange or change them.`,
     );
   }
-  const side = readChoice(
-    test.moist_side ?? 'outside',
-    `${path}.moist_side`,
-    ['outside', 'inside'] as const,
-    'Moist side',
-  );
+  const side = readChoice(test.moist_side ?? 'outside', `${path}.moist_side`, {
+    choices: ['outside', 'inside'] as const,
+    label: 'Moist side',
+  });
   return {
     gas,
     temperatureK,

@@ -28,18 +28,14 @@ export function wallState(layers: LayerDescription[], conditions: WallConditions
   const state = describeWall(new WallAtTemperature(read, temperatureK), {
     humidityOutside: readHumidity(conditions.relative_humidity_outside, 'relative_humidity_outside'),
     humidityInside: readHumidity(conditions.relative_humidity_inside, 'relative_humidity_inside'),
-    oxygenOutsidePa: readNumber(
-      conditions.oxygen_pressure_outside_Pa,
-      'oxygen_pressure_outside_Pa',
-      OXYGEN_PRESSURE,
-      label,
-    ),
-    oxygenInsidePa: readNumber(
-      conditions.oxygen_pressure_inside_Pa,
-      'oxygen_pressure_inside_Pa',
-      OXYGEN_PRESSURE,
-      label,
-    ),
+    oxygenOutsidePa: readNumber(conditions.oxygen_pressure_outside_Pa, 'oxygen_pressure_outside_Pa', {
+      range: OXYGEN_PRESSURE,
+      ...label,
+    }),
+    oxygenInsidePa: readNumber(conditions.oxygen_pressure_inside_Pa, 'oxygen_pressure_inside_Pa', {
+      range: OXYGEN_PRESSURE,
+      ...label,
+    }),
   });
   return { ...state, temperature_C: conditions.temperature_C };
 }

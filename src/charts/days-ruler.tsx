@@ -110,7 +110,7 @@ function Axis({ layout, width, formatDays }: AxisProps) {
   const flagX = isFlagLeft ? x - flagWidth : x;
   return (
     <Svg width={width} height={AXIS_PX} aria-hidden>
-      <Ticks ticks={layout.ticks} y={AXIS_Y} formatDays={formatDays} />
+      <Ticks ticks={layout.ticks} y={AXIS_Y} formatDays={formatDays} flagX={layout.target.x} />
       <Line x1={0} x2={width - END_PX} y1={AXIS_Y} y2={AXIS_Y} stroke={colors.ink} strokeWidth={1} />
       <Rect x={flagX} y={0} width={flagWidth} height={15} fill={colors.ink} />
       <Line x1={x} x2={x} y1={0} y2={AXIS_PX} stroke={colors.ink} strokeWidth={1.5} />
@@ -130,10 +130,16 @@ function FlagText({ x, text }: { x: number; text: string }) {
 interface TicksProps {
   ticks: RulerTick[];
   y: number;
+  /** Where the flag's pole stands: a number it would cut through is left out, the flag says its own. */
+  flagX?: number;
   formatDays: (days: number) => string;
 }
 
-function Ticks({ ticks, y, formatDays }: TicksProps) {
+function isCutByFlag(tick: RulerTick, label: string, flagX: number | undefined): boolean {
+  return flagX !== undefined && tick.day !== 0 && Math.abs(tick.x - flagX) < monoWidth(label) / 2 + 3;
+}
+
+function Ticks({ ticks, y, flagX, formatDays }: TicksProps) {
   const { colors } = useTheme();
   return (
     <>
@@ -147,7 +153,7 @@ function Ticks({ ticks, y, formatDays }: TicksProps) {
             stroke={colors.inkSecond}
             strokeWidth={1}
           />
-          {tick.isLabelled ? (
+          {tick.isLabelled && !isCutByFlag(tick, formatDays(tick.day), flagX) ? (
             <ChartText
               x={tick.day === 0 ? 0 : tick.x}
               y={y - 10}

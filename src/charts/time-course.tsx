@@ -55,6 +55,8 @@ function Plot(props: TimeCourseProps & { width: number }) {
   });
   const ink = gas === 'oxygen' ? colors.oxygen : colors.water;
   const targetX = course.toX(targetDays);
+  // The limit's word keeps away from where the course crosses it.
+  const isMetLate = reached !== null && course.toX(reached.day) > plotWidth / 2;
   return (
     <Svg width={width} height={TOP_PX + PLOT_PX + FOOT_PX} aria-hidden>
       <ChartText x={0} y={11} font="semibold" tone={gas} sizePx={12.5}>
@@ -113,6 +115,7 @@ function Plot(props: TimeCourseProps & { width: number }) {
             y={course.limits[index]?.y ?? 0}
             label={limit.label}
             plotWidth={plotWidth}
+            isAtStart={isMetLate}
           />
         ))}
         <Path d={course.line} stroke={ink} strokeWidth={2} fill="none" />
@@ -161,8 +164,16 @@ function TargetLine({ x, plotWidth, labelY }: { x: number; plotWidth: number; la
   );
 }
 
-function LimitLine({ y, label, plotWidth }: { y: number; label: string; plotWidth: number }) {
+interface LimitLineProps {
+  y: number;
+  label: string;
+  plotWidth: number;
+  isAtStart: boolean;
+}
+
+function LimitLine({ y, label, plotWidth, isAtStart }: LimitLineProps) {
   const { colors } = useTheme();
+  const width = monoWidth(label) + 4;
   return (
     <>
       <Line
@@ -175,14 +186,19 @@ function LimitLine({ y, label, plotWidth }: { y: number; label: string; plotWidt
         strokeDasharray="8 3"
       />
       <Rect
-        x={plotWidth - monoWidth(label) - 4}
+        x={isAtStart ? 2 : plotWidth - width}
         y={y < 14 ? y + 2 : y - 13}
-        width={monoWidth(label) + 4}
+        width={width}
         height={12}
         fill={colors.sheet}
         fillOpacity={0.85}
       />
-      <ChartText x={plotWidth - 2} y={y < 14 ? y + 12 : y - 3} anchor="end" tone="ink">
+      <ChartText
+        x={isAtStart ? 4 : plotWidth - 2}
+        y={y < 14 ? y + 12 : y - 3}
+        anchor={isAtStart ? 'start' : 'end'}
+        tone="ink"
+      >
         {label}
       </ChartText>
     </>

@@ -37,9 +37,9 @@ function storageKey({ userId, accountId, name }: DraftKey): string {
 }
 
 // Storage may be closed or full; work then goes on without drafts.
-function withStorage<Result>(use: (storage: Storage) => Result): Result | undefined {
+function withStorage<Result>(task: (storage: Storage) => Result): Result | undefined {
   try {
-    return use(window.localStorage);
+    return task(window.localStorage);
   } catch {
     return undefined;
   }

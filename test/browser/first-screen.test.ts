@@ -1,4 +1,5 @@
 import { gzipSync } from 'node:zlib';
+import type { Page, Response } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { FIRST_SCREEN_BUDGET_KB, measureFirstScreen } from '../../server/bin/web-size.mjs';
 import { startProduct, type RunningProduct } from '../harness/running-product';
@@ -28,8 +29,7 @@ afterAll(async () => {
 describe('the first screen', () => {
   it.each(Object.keys(DEVICES) as Device[])('opens without a fault on %s', async (device) => {
     const { page, close } = await browser.openPage(device);
-    await page.goto('/', { waitUntil: 'networkidle' });
-    expect((await page.locator('body').innerText()).trim()).not.toBe('');
+    await openSignIn(page);
     await expectNoAxeViolations(page);
     await screenshot(page, `first-screen-${device}`);
     await close();
@@ -37,13 +37,13 @@ describe('the first screen', () => {
 
   it('loads no more JavaScript than the budget, as the build prints it', async () => {
     const { page, close } = await browser.openPage('phone');
-    const scripts: Promise<number>[] = [];
+    const scripts: Response[] = [];
     page.on('response', (response) => {
-      if (!new URL(response.url()).pathname.endsWith('.js')) return;
-      scripts.push(response.body().then((body) => gzipSync(body).length / 1000));
+      if (new URL(response.url()).pathname.endsWith('.js')) scripts.push(response);
     });
-    await page.goto('/', { waitUntil: 'networkidle' });
-    const loadedKb = (await Promise.all(scripts)).reduce((sum, size) => sum + size, 0);
+    await openSignIn(page);
+    let loadedKb = 0;
+    for (const script of scripts) loadedKb += gzipSync(await script.body()).length / 1000;
     await close();
     expect(loadedKb).toBeGreaterThan(50);
     expect(loadedKb).toBeLessThanOrEqual(FIRST_SCREEN_BUDGET_KB);
@@ -54,3 +54,10 @@ describe('the first screen', () => {
     ).toBeLessThan(0.02);
   });
 });
+
+/** The start leads a stranger to the sign-in page; its first field is the sign that it stands. */
+async function openSignIn(page: Page): Promise<void> {
+  await page.goto('/');
+  await page.getByRole('textbox').first().waitFor();
+  await page.waitForLoadState('networkidle');
+}

@@ -11,7 +11,13 @@ export function evaluationBody(): EvaluationDescription {
           name: 'body',
           area_m2: 0.06,
           layers: [
-            { kind: 'film', name: 'PET', thickness_um: 12, oxygen: { permeability_mol_m_per_m2_s_Pa: 8e-18 }, water },
+            {
+              kind: 'film',
+              name: 'PET',
+              thickness_um: 12,
+              oxygen: { permeability_mol_m_per_m2_s_Pa: 8e-18 },
+              water,
+            },
             {
               kind: 'film',
               name: 'EVOH',
@@ -30,7 +36,12 @@ export function evaluationBody(): EvaluationDescription {
           name: 'lid',
           area_m2: 0.01,
           layers: [
-            { kind: 'foil', name: 'foil', thickness_um: 7, defects: { density_per_m2: 300, diameter_um: 25 } },
+            {
+              kind: 'foil',
+              name: 'foil',
+              thickness_um: 7,
+              defects: { density_per_m2: 300, diameter_um: 25 },
+            },
             { kind: 'film', name: 'PE', thickness_um: 50, oxygen: polymer, water },
           ],
         },

@@ -104,6 +104,12 @@ const IMPORT_RULES: readonly ImportRule[] = [
     remedy: 'src/session knows src/api and shared only.',
   },
   {
+    // The one place that gathers the screens behind the sign-in into a single download (see server/bin/web-size.mjs).
+    from: /^src\/features\/workbench\//,
+    mayImport: [/^src\/(features|ui)\//],
+    remedy: 'src/features/workbench only gathers screens of other features.',
+  },
+  {
     from: /^src\/features\//,
     mayImport: [/^src\/(ui|charts|api|session)\//, /^shared\//],
     remedy:

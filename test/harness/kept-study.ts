@@ -17,7 +17,11 @@ export function pathOf(client: TestClient, collection: string): string {
   return `/api/accounts/${client.accountId}/${collection}`;
 }
 
-export async function keep(client: TestClient, collection: string, spec: unknown): Promise<TestAnswer['json']> {
+export async function keep(
+  client: TestClient,
+  collection: string,
+  spec: unknown,
+): Promise<TestAnswer['json']> {
   const answer = await client.send('POST', pathOf(client, collection), { body: { spec } });
   if (answer.status !== 201) throw new Error(`POST ${collection} answered ${answer.status}: ${answer.text}`);
   return answer.json;

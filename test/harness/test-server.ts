@@ -3,7 +3,12 @@ import type { AddressInfo } from 'node:net';
 import { pino } from 'pino';
 import { createApp, routeTable } from '../../server/create-app';
 import { openDatabase, type Database } from '../../server/db/client';
-import { insertAccount, insertCompany, insertMembership, insertPerson } from '../../server/db/seed/people-builders';
+import {
+  insertAccount,
+  insertCompany,
+  insertMembership,
+  insertPerson,
+} from '../../server/db/seed/people-builders';
 import { startMailSink, type MailSink } from '../../server/fakes/mail-sink';
 import type { RouteDefinition } from '../../server/http/route-definition';
 import { originsOf } from '../../server/http/origin';
@@ -44,7 +49,7 @@ export interface TestClient {
 export interface SendOptions {
   body?: unknown;
   /** Sent as it is, instead of a body. */
-  raw?: string | Buffer;
+  raw?: string | Uint8Array<ArrayBuffer>;
   headers?: Record<string, string>;
   /** Made up when absent and the method is POST. */
   idempotencyKey?: string;
@@ -94,7 +99,9 @@ export async function startTestServer({ isDemo = true }: { isDemo?: boolean } = 
     isCheckingAnswers: true,
   };
   server.on('request', createApp(deps));
-  await jobs.start({ 'send-password-reset': (data) => sendResetMail({ db, mail, publicUrl: baseUrl }, data) });
+  await jobs.start({
+    'send-password-reset': (data) => sendResetMail({ db, mail, publicUrl: baseUrl }, data),
+  });
 
   const stranger = () => client(baseUrl, { accountId: '', userId: '', email: '', cookie: '' });
   return {
@@ -113,7 +120,9 @@ export async function startTestServer({ isDemo = true }: { isDemo?: boolean } = 
       const email = `${roles.join('-')}-${(keys += 1)}@test.example`;
       const userId = await insertPerson(db, { passwordHash: await passwordHash, email });
       await insertMembership(db, { accountId: inAccount, userId, roles, companyId });
-      const answer = await stranger().send('POST', '/api/session', { body: { email, password: TEST_PASSWORD } });
+      const answer = await stranger().send('POST', '/api/session', {
+        body: { email, password: TEST_PASSWORD },
+      });
       if (answer.status !== 200) throw new Error(`Signing in answered ${answer.status}: ${answer.text}`);
       const cookie = answer.headers.get('set-cookie')?.split(';')[0] ?? '';
       return client(baseUrl, { accountId: inAccount, userId, email, cookie });
@@ -129,7 +138,10 @@ export async function startTestServer({ isDemo = true }: { isDemo?: boolean } = 
   };
 }
 
-function client(baseUrl: string, who: Pick<TestClient, 'accountId' | 'userId' | 'email' | 'cookie'>): TestClient {
+function client(
+  baseUrl: string,
+  who: Pick<TestClient, 'accountId' | 'userId' | 'email' | 'cookie'>,
+): TestClient {
   async function send(method: string, path: string, options: SendOptions = {}): Promise<TestAnswer> {
     const headers: Record<string, string> = { Origin: baseUrl };
     if (who.cookie !== '') headers.Cookie = who.cookie;

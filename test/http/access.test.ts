@@ -43,7 +43,13 @@ const EXPECTED: Record<string, Expectation> = {
   'get /api/accounts/:account_id/studies/:id/results/:result_id': READERS,
 };
 
-const ROLE_SETS: readonly (readonly Role[])[] = [['engineer'], ['admin'], ['engineer', 'admin'], ['supplier'], ['client']];
+const ROLE_SETS: readonly (readonly Role[])[] = [
+  ['engineer'],
+  ['admin'],
+  ['engineer', 'admin'],
+  ['supplier'],
+  ['client'],
+];
 const NOBODYS_ID = '01900000-0000-7000-8000-000000000000';
 
 let server: TestServer;
@@ -96,13 +102,16 @@ describe('the access suite', () => {
     else expect(signedOut.json.error.code).toBe('session_missing');
 
     for (const [name, member] of members) {
-      const isAllowed = typeof expected === 'string' || name.split('+').some((role) => expected.some((one) => one === role));
+      const isAllowed =
+        typeof expected === 'string' || name.split('+').some((role) => expected.some((one) => one === role));
       // Signing out would end the session that later routes need.
       const who = route === 'delete /api/session' ? await server.signInAs(['client']) : member;
       const answer = await call(who, method, pathFor(path));
       if (isAllowed) {
         const isRefusedSignIn = route === 'post /api/session';
-        expect(isRefusedSignIn ? [400] : [200, 201, 202, 204, 400, 412], `${name} may ${route}`).toContain(answer.status);
+        expect(isRefusedSignIn ? [400] : [200, 201, 202, 204, 400, 412], `${name} may ${route}`).toContain(
+          answer.status,
+        );
       } else {
         expect(answer.status, `${name} may not ${route}`).toBe(404);
         expect(bodyWithoutRequestId(answer.text)).toBe(theOne404);
@@ -119,9 +128,15 @@ describe('the access suite', () => {
       expect([400, 404], `${name} smuggling ${route}`).toContain(smuggled.status);
       if (smuggled.status === 404) expect(bodyWithoutRequestId(smuggled.text)).toBe(theOne404);
     }
-    const owners = members.get(typeof expected !== 'string' && expected[0] === 'admin' ? 'admin' : 'engineer');
+    const owners = members.get(
+      typeof expected !== 'string' && expected[0] === 'admin' ? 'admin' : 'engineer',
+    );
     for (const broken of ['not-an-id', '%00', "' OR 1=1", NOBODYS_ID.toUpperCase()]) {
-      const answer = await call(owners ?? owner, method, pathFor(path, { accountId: encodeURIComponent(broken) }));
+      const answer = await call(
+        owners ?? owner,
+        method,
+        pathFor(path, { accountId: encodeURIComponent(broken) }),
+      );
       expect(bodyWithoutRequestId(answer.text), broken).toBe(theOne404);
     }
     if (path.includes(':id') && method === 'get') {
@@ -131,7 +146,14 @@ describe('the access suite', () => {
   });
 
   it('answers 404 in JSON for paths it does not know, signed in or not, however written', async () => {
-    for (const path of ['/api', '/api/', '/api/nothing', '/api/accounts', '/api/%E0%A4%A', '/api/session/..%2f..']) {
+    for (const path of [
+      '/api',
+      '/api/',
+      '/api/nothing',
+      '/api/accounts',
+      '/api/%E0%A4%A',
+      '/api/session/..%2f..',
+    ]) {
       for (const client of [server.stranger(), owner]) {
         const answer = await client.get(path);
         expect(answer.status, path).toBe(404);

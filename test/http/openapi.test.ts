@@ -16,8 +16,8 @@ it('is a valid OpenAPI document that holds every route', async () => {
   );
   const served = server.routes.map(({ method, path }) => `${method} ${path.replace(/:([a-z_]+)/g, '{$1}')}`);
   expect(documented.toSorted()).toEqual(served.toSorted());
-  const ids = Object.values(json.paths as Record<string, Record<string, { operationId: string }>>).flatMap((operations) =>
-    Object.values(operations).map((operation) => operation.operationId),
+  const ids = Object.values(json.paths as Record<string, Record<string, { operationId: string }>>).flatMap(
+    (operations) => Object.values(operations).map((operation) => operation.operationId),
   );
   expect(new Set(ids).size).toBe(ids.length);
   await SwaggerParser.validate(structuredClone(json));

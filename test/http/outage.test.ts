@@ -28,12 +28,17 @@ it('comes back by itself after its connections were cut, answering 503 at worst'
   const statuses: number[] = [];
   for (let round = 0; round < 3; round += 1) {
     await cutConnections();
-    const answers = await Promise.all(Array.from({ length: 8 }, () => engineer.get(pathOf(engineer, 'packs'))));
+    const answers = await Promise.all(
+      Array.from({ length: 8 }, () => engineer.get(pathOf(engineer, 'packs'))),
+    );
     statuses.push(...answers.map((answer) => answer.status));
   }
   expect(statuses.filter((status) => status !== 200 && status !== 503)).toEqual([]);
   expect((await engineer.get(pathOf(engineer, 'packs'))).status).toBe(200);
-  expect((await server.stranger().get('/api/health')).json).toMatchObject({ status: 'ok', database: 'answers' });
+  expect((await server.stranger().get('/api/health')).json).toMatchObject({
+    status: 'ok',
+    database: 'answers',
+  });
 });
 
 it('waits for a locked row no longer than anybody would, and says so', async () => {

@@ -21,7 +21,12 @@ beforeAll(async () => {
 });
 afterAll(() => server.close());
 
-const studyParts = () => ({ foodId: kept.foods, packId: kept.packs, routeId: kept.routes, laminateIds: [kept.laminates] });
+const studyParts = () => ({
+  foodId: kept.foods,
+  packId: kept.packs,
+  routeId: kept.routes,
+  laminateIds: [kept.laminates],
+});
 
 describe('a create', () => {
   it('makes one thing of ten requests with the same key at once', async () => {
@@ -43,10 +48,15 @@ describe('a create', () => {
     const path = pathOf(engineer, 'packs');
     const options = { idempotencyKey: 'one-key' };
     expect((await engineer.send('POST', path, { body: { spec: aPack() }, ...options })).status).toBe(201);
-    const other = await engineer.send('POST', path, { body: { spec: aPack({ name: 'Another' }) }, ...options });
+    const other = await engineer.send('POST', path, {
+      body: { spec: aPack({ name: 'Another' }) },
+      ...options,
+    });
     expect(other.json.error.code).toBe('idempotency_key_reused');
     expect(other.status).toBe(409);
-    expect((await colleague.send('POST', path, { body: { spec: aPack({ name: 'Hers' }) }, ...options })).status).toBe(201);
+    expect(
+      (await colleague.send('POST', path, { body: { spec: aPack({ name: 'Hers' }) }, ...options })).status,
+    ).toBe(201);
   });
 
   it('leaves the key free when it fails, and nothing of itself', async () => {
@@ -54,11 +64,16 @@ describe('a create', () => {
     const nobodysMaterial = { id: kept.foods, revisionId: kept.foods };
     const options = { idempotencyKey: 'fails-first' };
     const before = await server.db.$count(laminates);
-    const failed = await engineer.send('POST', path, { body: { spec: aLaminate([nobodysMaterial]) }, ...options });
+    const failed = await engineer.send('POST', path, {
+      body: { spec: aLaminate([nobodysMaterial]) },
+      ...options,
+    });
     expect(failed.status).toBe(400);
     expect(await server.db.$count(laminates)).toBe(before);
     const material = { id: kept.materials, revisionId: kept.materialRevision };
-    expect((await engineer.send('POST', path, { body: { spec: aLaminate([material]) }, ...options })).status).toBe(201);
+    expect(
+      (await engineer.send('POST', path, { body: { spec: aLaminate([material]) }, ...options })).status,
+    ).toBe(201);
   });
 
   it('wants a key', async () => {
@@ -76,7 +91,10 @@ describe('an edit', () => {
     const laminate = await keep(engineer, 'laminates', aLaminate([material], { name: 'Before' }));
     const path = `${pathOf(engineer, 'laminates')}/${laminate.id}`;
     const edit = (who: TestClient, name: string) =>
-      who.send('PUT', path, { body: { spec: aLaminate([material], { name }) }, ifMatch: laminate.revision.id });
+      who.send('PUT', path, {
+        body: { spec: aLaminate([material], { name }) },
+        ifMatch: laminate.revision.id,
+      });
     const answers = await Promise.all([edit(engineer, 'His'), edit(colleague, 'Hers')]);
     expect(answers.map((answer) => answer.status).toSorted()).toEqual([200, 412]);
     const winner = answers.find((answer) => answer.status === 200);
@@ -88,7 +106,11 @@ describe('an edit', () => {
       body: { spec: aLaminate([material], { name: 'On top' }), note: 'after talking' },
       ifMatch: loser?.json.error.current.revision.id,
     });
-    expect(again.json.revision).toMatchObject({ number: 3, note: 'after talking', created_by: colleague.userId });
+    expect(again.json.revision).toMatchObject({
+      number: 3,
+      note: 'after talking',
+      created_by: colleague.userId,
+    });
     const revisions = await engineer.get(`${path}/revisions`);
     expect(revisions.json.items.map((one: { number: number }) => one.number)).toEqual([3, 2, 1]);
     expect((await engineer.get(path)).headers.get('etag')).toBe(`"${again.json.revision.id}"`);
@@ -110,10 +132,16 @@ describe('a result', () => {
     const { sha256, ...rest } = (await engineer.get(path)).json;
     const [row] = await server.db.select().from(results).where(eq(results.id, kept.result));
     expect(row?.body.toString('utf8')).toBe(canonicalize(rest));
-    expect(createHash('sha256').update(row?.body ?? '').digest('hex')).toBe(sha256);
+    expect(
+      createHash('sha256')
+        .update(row?.body ?? '')
+        .digest('hex'),
+    ).toBe(sha256);
     expect(rest.engine_version).toBe(row?.engineVersion);
     const [candidate] = rest.candidates;
-    expect(candidate.description.pack.walls[0].layers[0].oxygen.permeability_mol_m_per_m2_s_Pa).toBeGreaterThan(0);
+    expect(
+      candidate.description.pack.walls[0].layers[0].oxygen.permeability_mol_m_per_m2_s_Pa,
+    ).toBeGreaterThan(0);
     expect(candidate.description.pack.seal.sealant_thickness_um).toBe(100);
     expect(candidate.answer.courses.days.length).toBeGreaterThan(100);
     expect(candidate.answer.walls[0].area_m2).toBeCloseTo(2 * 0.144 * 0.218 + 2 * 0.144 * 0.04, 9);
@@ -173,12 +201,16 @@ describe('what the application role may not do', () => {
     for (const url of [server.database.url, server.database.ownerUrl]) {
       const sql = postgres(url, { max: 1, onnotice: () => undefined });
       try {
-        const [{ rows }] = (await sql.unsafe(`SELECT count(*)::int AS rows FROM ${table}`)) as [{ rows: number }];
+        const [{ rows }] = (await sql.unsafe(`SELECT count(*)::int AS rows FROM ${table}`)) as [
+          { rows: number },
+        ];
         expect(rows).toBeGreaterThan(0);
         const [column] = await sql`
           SELECT column_name AS name FROM information_schema.columns WHERE table_name = ${table} LIMIT 1`;
         await expect(sql.unsafe(`DELETE FROM ${table}`)).rejects.toMatchObject({ code: '42501' });
-        await expect(sql.unsafe(`UPDATE ${table} SET ${column?.name} = ${column?.name}`)).rejects.toMatchObject({ code: '42501' });
+        await expect(
+          sql.unsafe(`UPDATE ${table} SET ${column?.name} = ${column?.name}`),
+        ).rejects.toMatchObject({ code: '42501' });
         await expect(sql.unsafe(`TRUNCATE ${table} CASCADE`)).rejects.toMatchObject({ code: '42501' });
         expect(await sql.unsafe(`SELECT count(*)::int AS rows FROM ${table}`)).toMatchObject([{ rows }]);
       } finally {
@@ -190,7 +222,12 @@ describe('what the application role may not do', () => {
   it('make or drop tables, or delete what has revisions', async () => {
     const sql = postgres(server.database.url, { max: 1 });
     try {
-      for (const statement of ['CREATE TABLE mine (a int)', 'DROP TABLE audit_log', 'DELETE FROM laminates', 'ALTER TABLE users ADD a int']) {
+      for (const statement of [
+        'CREATE TABLE mine (a int)',
+        'DROP TABLE audit_log',
+        'DELETE FROM laminates',
+        'ALTER TABLE users ADD a int',
+      ]) {
         await expect(sql.unsafe(statement), statement).rejects.toMatchObject({ code: '42501' });
       }
     } finally {
@@ -218,7 +255,11 @@ it('writes down what happened, by id and without names', async () => {
     body: { spec: aPack({ name: 'Wider' }) },
     ifMatch: pack.revision.id,
   });
-  const entries = await server.db.select().from(auditLog).where(eq(auditLog.accountId, fresh.accountId)).orderBy(asc(auditLog.id));
+  const entries = await server.db
+    .select()
+    .from(auditLog)
+    .where(eq(auditLog.accountId, fresh.accountId))
+    .orderBy(asc(auditLog.id));
   expect(entries.map(({ action, subjectId, actorUserId }) => [action, subjectId, actorUserId])).toEqual([
     ['pack.created', pack.id, fresh.userId],
     ['pack.revised', pack.id, fresh.userId],
@@ -226,13 +267,17 @@ it('writes down what happened, by id and without names', async () => {
   const listed = await fresh.get(pathOf(fresh, 'audit-entries'));
   expect(listed.json.items[0]).toMatchObject({ action: 'pack.revised', actor_name: 'A person' });
   const team = await fresh.get(pathOf(fresh, 'team'));
-  expect(team.json).toMatchObject({ seats_in_use: 1, people: [{ roles: ['engineer', 'admin'], company: null }] });
+  expect(team.json).toMatchObject({
+    seats_in_use: 1,
+    people: [{ roles: ['engineer', 'admin'], company: null }],
+  });
 });
 
 it('pages through a collection without a gap or a repeat', async () => {
   const fresh = await server.signInAs(['engineer']);
   const made: string[] = [];
-  for (let i = 0; i < 7; i += 1) made.unshift((await keep(fresh, 'routes', aRoute({ name: `Route ${i}` }))).id);
+  for (let i = 0; i < 7; i += 1)
+    made.unshift((await keep(fresh, 'routes', aRoute({ name: `Route ${i}` }))).id);
   const seen: string[] = [];
   let after = '';
   do {
@@ -249,7 +294,9 @@ it('does not lend another account’s material to a wall, nor its wall to a stud
   const stolen = aLaminate([{ id: theirs.id, revisionId: theirs.revision.id }]);
   const wall = await engineer.send('POST', pathOf(engineer, 'laminates'), { body: { spec: stolen } });
   expect(wall.json.error.fields[0].path).toBe('spec.layers[0].material_revision_id');
-  const study = await outsider.send('POST', pathOf(outsider, 'studies'), { body: { spec: aStudy(studyParts()) } });
+  const study = await outsider.send('POST', pathOf(outsider, 'studies'), {
+    body: { spec: aStudy(studyParts()) },
+  });
   expect(study.json.error.fields.map((fault: { path: string }) => fault.path)).toEqual([
     'spec.food_id',
     'spec.pack_id',

@@ -42,7 +42,9 @@ it('answers alike for a wrong password and an address nobody has', async () => {
 
 it('limits tries per address, also when they come all at once, and lets others in', async () => {
   const victim = await server.signInAs(['engineer']);
-  const tries = await Promise.all(Array.from({ length: 14 }, () => trySignIn(victim.email, 'a guess of many')));
+  const tries = await Promise.all(
+    Array.from({ length: 14 }, () => trySignIn(victim.email, 'a guess of many')),
+  );
   const statuses = tries.map((one) => one.status);
   expect(statuses.filter((status) => status === 401).length).toBeLessThanOrEqual(8);
   expect(statuses).toContain(429);
@@ -61,14 +63,20 @@ it('signs out for good', async () => {
 
 it('keeps what a person prefers', async () => {
   const body = { unit_system: 'us_customary' };
-  expect((await person.send('PATCH', '/api/session/preferences', { body })).json.user.unit_system).toBe('us_customary');
+  expect((await person.send('PATCH', '/api/session/preferences', { body })).json.user.unit_system).toBe(
+    'us_customary',
+  );
   expect((await person.get('/api/session')).json.user.unit_system).toBe('us_customary');
 });
 
 it('mails a link that sets a new password once and ends every session', async () => {
   const forgetful = await server.signInAs(['admin']);
-  const asked = await server.stranger().send('POST', '/api/password-resets', { body: { email: forgetful.email } });
-  const unknown = await server.stranger().send('POST', '/api/password-resets', { body: { email: 'no@test.example' } });
+  const asked = await server
+    .stranger()
+    .send('POST', '/api/password-resets', { body: { email: forgetful.email } });
+  const unknown = await server
+    .stranger()
+    .send('POST', '/api/password-resets', { body: { email: 'no@test.example' } });
   expect([asked.status, unknown.status]).toEqual([202, 202]);
   const mail = await waitForMail(forgetful.email);
   expect(mail.messageId).toMatch(/^<password-reset\..+@127\.0\.0\.1>$/);
@@ -102,7 +110,9 @@ it('keeps nothing in the database or the log that opens a session or sets a pass
     expect(tables.length).toBeGreaterThan(20);
     let dump = '';
     for (const { name } of tables) {
-      const rows = await owner.unsafe(`SELECT coalesce(string_agg(t::text, E'\\n'), '') AS text FROM ${name} t`);
+      const rows = await owner.unsafe(
+        `SELECT coalesce(string_agg(t::text, E'\\n'), '') AS text FROM ${name} t`,
+      );
       dump += rows[0]?.text;
     }
     expect(dump).toContain(sleeper.email);
@@ -114,7 +124,9 @@ it('keeps nothing in the database or the log that opens a session or sets a pass
     await owner.end();
   }
   // The stored hash itself is no key.
-  const [stored] = await server.db.query.sessions.findMany({ where: (row, { eq }) => eq(row.userId, sleeper.userId) });
+  const [stored] = await server.db.query.sessions.findMany({
+    where: (row, { eq }) => eq(row.userId, sleeper.userId),
+  });
   const withHash = await server.stranger().send('GET', '/api/session', {
     headers: { Cookie: `larderline_session=${stored?.id}` },
   });

@@ -50,7 +50,13 @@ class Factor:
             self.l = [x - self.ln(gas.get("reference_relative_humidity", 0.0)) for x in l]
 
     def ln(self, h):
-        return float(np.interp(h, self.h, self.l))
+        x, y = self.h, self.l
+        if h <= x[0]:
+            return y[0]
+        if h >= x[-1]:
+            return y[-1]
+        k = bisect.bisect_right(x, h) - 1
+        return y[k] + (y[k + 1] - y[k]) * ((h - x[k]) / (x[k + 1] - x[k]))
 
     def __call__(self, h):
         return math.exp(self.ln(h))
@@ -240,7 +246,8 @@ def iso(d):
 ORDER = ["oxygen_uptake_mg_per_kg", "headspace_oxygen_percent", "moisture_max_g_per_g", "moisture_min_g_per_g"]
 
 
-def storage(s, method="DOP853"):
+def storage(s, method="DOP853", rtol=1e-11, atol=1e-15, conditions=None):
+    """`conditions` takes, for each limit reached, |d ln day / d ln value| there; infinite for a step between legs."""
     pack, food = s["pack"], s["food"]
     pt = s.get("total_pressure_Pa", ATM)
     V = pack.get("headspace_cm3", 0) * 1e-6
@@ -297,6 +304,8 @@ def storage(s, method="DOP853"):
         for name in lim:
             if name not in got and past(name, v[name]):
                 got[name] = t
+                if conditions is not None:
+                    conditions[name] = math.inf if t > 0 else 0.0
         fixed = None if has else pk.K(ho, food["inside_relative_humidity"])
 
         def rhs(_t, y, absorbing):
@@ -330,12 +339,18 @@ def storage(s, method="DOP853"):
             stop.terminal = True
             if absorbing:
                 events.append(stop)
-            sol = solve_ivp(rhs, (t, end), y, method=method, rtol=1e-11, atol=1e-15, events=events or None,
+            sol = solve_ivp(rhs, (t, end), y, method=method, rtol=rtol, atol=atol, events=events or None,
                             dense_output=True, args=(absorbing,))
             assert sol.success, sol.message
-            for name, te in zip(names, sol.t_events or []):
-                if len(te):
-                    got[name] = float(te[0])
+            for k, (name, te) in enumerate(zip(names, sol.t_events or [])):
+                if not len(te):
+                    continue
+                got[name] = float(te[0])
+                if conditions is not None:
+                    at = sol.y_events[k][0]
+                    speed = rhs(te[0], at, absorbing)[{"o": 2, "h": 1, "m": 0}[name[0]]]
+                    place = at[{"o": 2, "h": 1, "m": 0}[name[0]]]
+                    conditions[name] = abs(place / (te[0] * speed)) if te[0] * speed != 0 else math.inf
             for d in days:
                 if t < d <= sol.t[-1] and d not in out:
                     out[d] = (values(sol.sol(d), leg), sol.sol(d)[3])
@@ -539,4 +554,5 @@ def main():
                "cases": cases}, sys.stdout, indent=1)
 
 
-main()
+if __name__ == "__main__":
+    main()

@@ -1,1 +1,1 @@
-export { AccountScreen as default } from '../../../src/features/account/account-screen';
+export { AccountScreen as default } from '../../../src/features/workbench/lazy-screens';

@@ -1,1 +1,1 @@
-export { AccountRedirect as default } from '../../../src/features/shell/account-redirect';
+export { AccountRedirect as default } from '../../../src/features/workbench/lazy-screens';

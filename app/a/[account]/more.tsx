@@ -1,1 +1,1 @@
-export { MoreScreen as default } from '../../../src/features/shell/more-screen';
+export { MoreScreen as default } from '../../../src/features/workbench/lazy-screens';

@@ -1,4 +1,14 @@
-import { foreignKey, index, integer, jsonb, pgTable, primaryKey, text, unique, uuid } from 'drizzle-orm/pg-core';
+import {
+  foreignKey,
+  index,
+  integer,
+  jsonb,
+  pgTable,
+  primaryKey,
+  text,
+  unique,
+  uuid,
+} from 'drizzle-orm/pg-core';
 import type { StudyHeadline } from '../../../shared/contract/studies';
 import { bytea, createdAt, id } from './columns';
 import { studies, studyRevisions } from './kept-things';
@@ -48,7 +58,9 @@ export const resultPins = pgTable(
     resultId: uuid('result_id')
       .notNull()
       .references(() => results.id),
-    collection: text('collection', { enum: ['materials', 'laminates', 'packs', 'foods', 'routes'] }).notNull(),
+    collection: text('collection', {
+      enum: ['materials', 'laminates', 'packs', 'foods', 'routes'],
+    }).notNull(),
     thingId: uuid('thing_id').notNull(),
     revisionId: uuid('revision_id').notNull(),
   },

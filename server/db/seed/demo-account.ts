@@ -189,6 +189,7 @@ export const demoStudies = [
     route: 'europe-to-tropics-by-sea',
     laminate: 'evoh',
     targetDays: 120,
-    notes: 'A humidity-sensitive barrier on a tropical route: oxygen figures alone would call it safe, water ends it.',
+    notes:
+      'A humidity-sensitive barrier on a tropical route: oxygen figures alone would call it safe, water ends it.',
   },
 ] as const satisfies readonly DemoStudy[];

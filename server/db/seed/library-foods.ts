@@ -31,9 +31,14 @@ const SAFETY_CAUTION =
   'Do not design a low-oxygen pack for this food without a food-safety plan by a qualified process authority.';
 
 /** The starting library of foods; their masses are those that the demo packs hold. */
-export function libraryFoods(massesKg: Readonly<Record<string, number>>): { libraryId: string; spec: FoodSpec }[] {
+export function libraryFoods(
+  massesKg: Readonly<Record<string, number>>,
+): { libraryId: string; spec: FoodSpec }[] {
   const foods: LibraryFood[] = library.foods;
-  return foods.map((food) => ({ libraryId: food.id, spec: specOf(food, massesKg[food.id] ?? USUAL_MASS_KG) }));
+  return foods.map((food) => ({
+    libraryId: food.id,
+    spec: specOf(food, massesKg[food.id] ?? USUAL_MASS_KG),
+  }));
 }
 
 function specOf(food: LibraryFood, massKg: number): FoodSpec {

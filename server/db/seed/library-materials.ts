@@ -60,9 +60,12 @@ function specOf(material: LibraryMaterial): MaterialSpec {
     provenance: provenanceOf(material.provenance, library.sources),
   };
   const { pinholes } = material;
-  const defects = pinholes ? { density_per_m2: pinholes.densityPerM2, diameter_um: pinholes.diameterUm } : null;
+  const defects = pinholes
+    ? { density_per_m2: pinholes.densityPerM2, diameter_um: pinholes.diameterUm }
+    : null;
   if (material.kind === 'foil') return { ...common, kind: 'foil', defects };
-  if (!material.oxygen || !material.water) throw new Error(`${material.id}: a ${material.kind} needs both gases.`);
+  if (!material.oxygen || !material.water)
+    throw new Error(`${material.id}: a ${material.kind} needs both gases.`);
   return material.kind === 'film'
     ? { ...common, kind: 'film', ...filmGases(material.oxygen, material.water) }
     : { ...common, kind: 'coating', ...coatingGases(material.oxygen, material.water), defects };
@@ -95,8 +98,13 @@ function statedOf(gas: LibraryGas): StatedValue {
     unit: gas.unit,
     temperature_C: gas.temperatureC,
     ...(relativeHumidity !== null && { relative_humidity: relativeHumidity }),
-    ...(gas.rhHigh !== undefined && { relative_humidity_high: gas.rhHigh, relative_humidity_low: gas.rhLow ?? 0 }),
-    ...(activationEnergyKjPerMol !== null && { activation_energy_J_per_mol: activationEnergyKjPerMol * 1000 }),
+    ...(gas.rhHigh !== undefined && {
+      relative_humidity_high: gas.rhHigh,
+      relative_humidity_low: gas.rhLow ?? 0,
+    }),
+    ...(activationEnergyKjPerMol !== null && {
+      activation_energy_J_per_mol: activationEnergyKjPerMol * 1000,
+    }),
     ...(measuredRangeC && {
       measured_temperature_min_C: measuredRangeC[0],
       measured_temperature_max_C: measuredRangeC[1],
@@ -106,7 +114,10 @@ function statedOf(gas: LibraryGas): StatedValue {
 }
 
 function curveOf(points: number[][]): HumidityCurveDescription {
-  return { relative_humidity: points.map(([humidity = 0]) => humidity), factor: points.map(([, factor = 1]) => factor) };
+  return {
+    relative_humidity: points.map(([humidity = 0]) => humidity),
+    factor: points.map(([, factor = 1]) => factor),
+  };
 }
 
 function engineStated({ oxygen_mole_fraction_dry, ...rest }: StatedValue): Omit<StatedGas, 'gas' | 'kind'> {

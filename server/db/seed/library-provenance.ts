@@ -1,6 +1,8 @@
 import { PROVENANCE_KINDS, type ProvenanceEntry } from '../../../shared/contract/materials';
 
-export type LibraryProvenance = Readonly<Record<string, { kind: string; source: string; note: string } | undefined>>;
+export type LibraryProvenance = Readonly<
+  Record<string, { kind: string; source: string; note: string } | undefined>
+>;
 export type LibrarySources = Readonly<Record<string, { text: string; read?: string }>>;
 
 /** Provenance as the library keeps it, by field, with its source written out. */

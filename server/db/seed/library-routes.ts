@@ -17,7 +17,12 @@ function zones() {
       ...commonOf(zone.name, zone.provenance),
       route: {
         legs: [
-          { name: zone.name, temperature_C: zone.temperatureC, relative_humidity: zone.relativeHumidity, days: YEAR_DAYS },
+          {
+            name: zone.name,
+            temperature_C: zone.temperatureC,
+            relative_humidity: zone.relativeHumidity,
+            days: YEAR_DAYS,
+          },
         ],
         after_last: 'hold' as const,
       },

@@ -22,40 +22,50 @@ describe('the library', () => {
     expect(libraryRoutes().length).toBe(19);
   });
 
-  it.each(materials.filter(({ spec }) => spec.kind !== 'foil').map((material) => [material.libraryId, material.spec]))(
-    'gives the stated rates of %s back when their tests are computed',
-    (_id, spec) => {
-      if (spec.kind === 'foil') throw new Error('A foil has no rates.');
-      // A film of 1 µm, so that its rate is the stated rate times thickness.
-      const layer: LayerDescription =
-        spec.kind === 'film'
-          ? { kind: 'film', name: 'it', thickness_um: 1, oxygen: spec.oxygen.gas, water: spec.water.gas }
-          : { kind: 'coating', name: 'it', oxygen: spec.oxygen.gas, water: spec.water.gas };
-      const oxygen = spec.oxygen.stated;
-      const humidity = oxygen.relative_humidity ?? 0;
-      const inOxygen = wallInTest([layer], {
-        gas: 'oxygen',
-        temperature_C: oxygen.temperature_C,
-        relative_humidity_outside: humidity,
-        relative_humidity_inside: humidity,
-        oxygen_mole_fraction_dry: 1,
-      } satisfies TransmissionTest);
-      expect(fromSi(inOxygen.permeance_mol_per_m2_s_Pa, 'cm3(STP)/(m2*day*atm)') / oxygen.value).toBeCloseTo(1, 6);
-      const water = spec.water.stated;
-      const inWater = wallInTest([layer], {
-        gas: 'water',
-        temperature_C: water.temperature_C,
-        relative_humidity_high: water.relative_humidity_high ?? NaN,
-        relative_humidity_low: water.relative_humidity_low ?? NaN,
-      } satisfies TransmissionTest);
-      expect((inWater.rate_g_per_m2_day ?? NaN) / water.value).toBeCloseTo(1, 4);
-    },
-  );
+  it.each(
+    materials
+      .filter(({ spec }) => spec.kind !== 'foil')
+      .map((material) => [material.libraryId, material.spec]),
+  )('gives the stated rates of %s back when their tests are computed', (_id, spec) => {
+    if (spec.kind === 'foil') throw new Error('A foil has no rates.');
+    // A film of 1 µm, so that its rate is the stated rate times thickness.
+    const layer: LayerDescription =
+      spec.kind === 'film'
+        ? { kind: 'film', name: 'it', thickness_um: 1, oxygen: spec.oxygen.gas, water: spec.water.gas }
+        : { kind: 'coating', name: 'it', oxygen: spec.oxygen.gas, water: spec.water.gas };
+    const oxygen = spec.oxygen.stated;
+    const humidity = oxygen.relative_humidity ?? 0;
+    const inOxygen = wallInTest([layer], {
+      gas: 'oxygen',
+      temperature_C: oxygen.temperature_C,
+      relative_humidity_outside: humidity,
+      relative_humidity_inside: humidity,
+      oxygen_mole_fraction_dry: 1,
+    } satisfies TransmissionTest);
+    expect(fromSi(inOxygen.permeance_mol_per_m2_s_Pa, 'cm3(STP)/(m2*day*atm)') / oxygen.value).toBeCloseTo(
+      1,
+      6,
+    );
+    const water = spec.water.stated;
+    const inWater = wallInTest([layer], {
+      gas: 'water',
+      temperature_C: water.temperature_C,
+      relative_humidity_high: water.relative_humidity_high ?? NaN,
+      relative_humidity_low: water.relative_humidity_low ?? NaN,
+    } satisfies TransmissionTest);
+    expect((inWater.rate_g_per_m2_day ?? NaN) / water.value).toBeCloseTo(1, 4);
+  });
 });
 
 describe('the demo', () => {
   it('has people of every role, at example addresses, with passwords of 12 characters', () => {
-    expect(demoPeople.map((person) => person.role)).toEqual(['engineer', 'admin', 'supplier', 'client', 'engineer and admin']);
+    expect(demoPeople.map((person) => person.role)).toEqual([
+      'engineer',
+      'admin',
+      'supplier',
+      'client',
+      'engineer and admin',
+    ]);
     for (const { email, password } of demoPeople) {
       expect(email).toMatch(/\.example$/);
       expect(password.length).toBeGreaterThanOrEqual(12);

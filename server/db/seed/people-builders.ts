@@ -5,7 +5,12 @@ import { accounts, companies, memberships, people, users } from '../schema';
 /** Inserts one account; every value has a default. */
 export async function insertAccount(
   db: Queryable,
-  { slug = `account-${newId()}`, name = 'Test kitchen', currency = 'EUR', timeZone = 'Europe/Amsterdam' } = {},
+  {
+    slug = `account-${newId()}`,
+    name = 'Test kitchen',
+    currency = 'EUR',
+    timeZone = 'Europe/Amsterdam',
+  } = {},
 ): Promise<string> {
   const id = newId();
   await db.insert(accounts).values({ id, slug, name, currency, timeZone });
@@ -42,6 +47,9 @@ interface NewMembership {
   companyId?: string | null;
 }
 
-export async function insertMembership(db: Queryable, { accountId, userId, roles, companyId = null }: NewMembership) {
+export async function insertMembership(
+  db: Queryable,
+  { accountId, userId, roles, companyId = null }: NewMembership,
+) {
   await db.insert(memberships).values({ accountId, userId, roles: [...roles], companyId });
 }

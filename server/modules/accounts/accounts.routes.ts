@@ -1,4 +1,9 @@
-import { auditEntriesPath, auditPageSchema, teamPath, teamResponseSchema } from '../../../shared/contract/accounts';
+import {
+  auditEntriesPath,
+  auditPageSchema,
+  teamPath,
+  teamResponseSchema,
+} from '../../../shared/contract/accounts';
 import { pageQuerySchema } from '../../../shared/contract/fields';
 import type { Database } from '../../db/client';
 import { accountRoute, type RouteDefinition } from '../../http/route-definition';

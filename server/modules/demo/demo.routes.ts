@@ -37,7 +37,12 @@ export function demoRoutes({ demo }: { demo: Demo | null }): RouteDefinition[] {
       responses: { 200: demoResponseSchema },
       async handle() {
         if (demo === null) throw notFound();
-        const people = demo.people.map(({ role, name, email, password }) => ({ role, name, email, password }));
+        const people = demo.people.map(({ role, name, email, password }) => ({
+          role,
+          name,
+          email,
+          password,
+        }));
         return { status: 200, body: { people } };
       },
     }),

@@ -31,7 +31,10 @@ type Kept = Map<string, KeptThing<unknown>>;
 /** Fills an empty database with the demo account, all or nothing. False where it is there already. */
 export async function seedDemo({ db, engine }: { db: Database; engine: EnginePort }): Promise<boolean> {
   return db.transaction(async (tx) => {
-    const [existing] = await tx.select({ id: accounts.id }).from(accounts).where(eq(accounts.slug, demoAccount.slug));
+    const [existing] = await tx
+      .select({ id: accounts.id })
+      .from(accounts)
+      .where(eq(accounts.slug, demoAccount.slug));
     if (existing) return false;
     const { accountId, engineerId } = await seedPeople(tx);
     const kept = await seedThings(tx, accountId);
@@ -91,7 +94,11 @@ async function seedThings(tx: Transaction, accountId: string): Promise<Kept> {
       name: laminate.name,
       layers: laminate.layers.map(([libraryId, thicknessUm]) => {
         const material = thingOf(kept, `materials/${libraryId}`);
-        return { material_id: material.id, material_revision_id: material.revision.id, thickness_um: thicknessUm };
+        return {
+          material_id: material.id,
+          material_revision_id: material.revision.id,
+          thickness_um: thicknessUm,
+        };
       }),
     };
     await keep(`laminates/${laminate.key}`, { things: laminates, revisions: laminateRevisions }, spec);

@@ -1,5 +1,9 @@
 import { evaluationAnswerSchema } from '../../../shared/contract/evaluation-answer';
-import { EVALUATIONS_PATH, evaluationRequestSchema, type EvaluationRequest } from '../../../shared/contract/evaluations';
+import {
+  EVALUATIONS_PATH,
+  evaluationRequestSchema,
+  type EvaluationRequest,
+} from '../../../shared/contract/evaluations';
 import { schemaOf, signedInRoute, type RouteDefinition } from '../../http/route-definition';
 import type { EnginePort } from '../../jobs/engine-workers';
 import { evaluateDescription } from './evaluate-description';

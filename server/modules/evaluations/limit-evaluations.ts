@@ -17,8 +17,12 @@ export function limitEvaluations(nowMs: () => number = Date.now): (userId: strin
     made.set(userId, count);
     if (count <= MOST_PER_WINDOW) return;
     const retryAfterS = Math.max(1, Math.ceil((WINDOW_MS - elapsedMs) / 1000));
-    throw new AppError('too_many_requests', `More than ${MOST_PER_WINDOW} evaluations in a minute. Wait ${retryAfterS} s.`, {
-      retryAfterS,
-    });
+    throw new AppError(
+      'too_many_requests',
+      `More than ${MOST_PER_WINDOW} evaluations in a minute. Wait ${retryAfterS} s.`,
+      {
+        retryAfterS,
+      },
+    );
   };
 }

@@ -16,7 +16,13 @@ function inPlainPack({ food, limits, absorber_capacity_cm3_STP }: FoodSpec): Eva
   const gas = { permeability_mol_m_per_m2_s_Pa: 1e-18 };
   return {
     pack: {
-      walls: [{ name: 'wall', area_m2: 0.1, layers: [{ kind: 'film', name: 'film', thickness_um: 50, oxygen: gas, water: gas }] }],
+      walls: [
+        {
+          name: 'wall',
+          area_m2: 0.1,
+          layers: [{ kind: 'film', name: 'film', thickness_um: 50, oxygen: gas, water: gas }],
+        },
+      ],
       headspace_cm3: 100,
       starting_headspace_oxygen_percent: 1,
     },

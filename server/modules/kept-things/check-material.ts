@@ -1,5 +1,10 @@
 import type { MaterialSpec, StatedValue } from '../../../shared/contract/materials';
-import { gasFromStated, InputError, type CoatingGasDescription, type FilmGasDescription } from '../../../shared/engine';
+import {
+  gasFromStated,
+  InputError,
+  type CoatingGasDescription,
+  type FilmGasDescription,
+} from '../../../shared/engine';
 import type { FieldFault } from '../../../shared/errors/error-code';
 import { inputInvalid } from '../../http/app-error';
 
@@ -32,12 +37,15 @@ function faultsOfGas(spec: Exclude<MaterialSpec, { kind: 'foil' }>, gas: Gas): F
 }
 
 /** The engine's gas block of a stated value. */
-export function gasOfStated(stated: StatedValue, { gas, kind }: { gas: Gas; kind: 'film' | 'coating' }): GasBlock {
+function gasOfStated(stated: StatedValue, { gas, kind }: { gas: Gas; kind: 'film' | 'coating' }): GasBlock {
   const { oxygen_mole_fraction_dry, ...rest } = stated;
   return gasFromStated({ ...rest, gas_mole_fraction_dry: oxygen_mole_fraction_dry, gas, kind });
 }
 
-function differences(given: GasBlock, computed: GasBlock): [key: string, given: unknown, expected: unknown][] {
+function differences(
+  given: GasBlock,
+  computed: GasBlock,
+): [key: string, given: unknown, expected: unknown][] {
   const flatGiven = flatten(given);
   const flatComputed = flatten(computed);
   const keys = new Set([...flatGiven.keys(), ...flatComputed.keys()]);
@@ -59,7 +67,9 @@ function flatten(block: GasBlock): Map<string, number> {
   for (const [key, value] of Object.entries(block)) {
     if (typeof value === 'number') flat.set(key, value);
   }
-  block.humidity_curve?.relative_humidity.forEach((value, i) => flat.set(`humidity_curve.relative_humidity[${i}]`, value));
+  block.humidity_curve?.relative_humidity.forEach((value, i) =>
+    flat.set(`humidity_curve.relative_humidity[${i}]`, value),
+  );
   block.humidity_curve?.factor.forEach((value, i) => flat.set(`humidity_curve.factor[${i}]`, value));
   return flat;
 }

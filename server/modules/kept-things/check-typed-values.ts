@@ -28,12 +28,18 @@ interface TypedValue {
 
 /** What was typed must be what is stored: each typed value converts to the number at its path. */
 export function checkTypedValues(spec: { typed?: Record<string, TypedValue> | undefined }): void {
-  const faults = Object.entries(spec.typed ?? {}).flatMap(([path, typed]) => faultOf(spec, path, typed) ?? []);
+  const faults = Object.entries(spec.typed ?? {}).flatMap(
+    ([path, typed]) => faultOf(spec, path, typed) ?? [],
+  );
   if (faults.length > 0) throw inputInvalid(faults);
 }
 
 function faultOf(spec: object, path: string, typed: TypedValue): FieldFault | undefined {
-  const fault = (message: string): FieldFault => ({ path: `spec.typed["${path}"]`, value: typed.value, message });
+  const fault = (message: string): FieldFault => ({
+    path: `spec.typed["${path}"]`,
+    value: typed.value,
+    message,
+  });
   const stored = valueAt(spec, path);
   if (typeof stored !== 'number') return fault(`There is no number at ${path}.`);
   const unit = UNIT_BY_ENDING.find(([ending]) => path.endsWith(ending))?.[1];
@@ -46,7 +52,12 @@ function faultOf(spec: object, path: string, typed: TypedValue): FieldFault | un
     throw error;
   }
   const isSame = Math.abs(converted - stored) <= TOLERANCE * Math.max(Math.abs(stored), 1e-12);
-  return isSame ? undefined : { ...fault(`${typed.value} ${typed.unit} is ${converted} ${unit}, not ${stored}.`), path: `spec.${path}` };
+  return isSame
+    ? undefined
+    : {
+        ...fault(`${typed.value} ${typed.unit} is ${converted} ${unit}, not ${stored}.`),
+        path: `spec.${path}`,
+      };
 }
 
 /** The value at a path such as `layers[0].thickness_um`; own keys only. */

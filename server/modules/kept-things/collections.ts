@@ -48,7 +48,10 @@ export interface CollectionDefinition<Spec> {
   check: (db: Queryable, accountId: string, spec: Spec) => Promise<void>;
 }
 
-const materialRevisionSchema = closedObject({ ...revisionSchema(closedObject({})).fields, spec: materialSpecSchema });
+const materialRevisionSchema = closedObject({
+  ...revisionSchema(closedObject({})).fields,
+  spec: materialSpecSchema,
+});
 const materialThingSchema = closedObject({
   ...keptThingSchema(closedObject({})).fields,
   revision: materialRevisionSchema.required(),

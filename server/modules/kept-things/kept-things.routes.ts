@@ -70,7 +70,13 @@ function routesOf<Spec>(db: Database, definition: CollectionDefinition<Spec>): R
       requestSchema: definition.reviseSchema,
       responses: { 200: definition.thingSchema },
       handle: ({ actor, params, body, ifMatch }) =>
-        reviseThing(db, definition, { actor, id: params.id ?? '', ifMatch, spec: body.spec, note: body.note }),
+        reviseThing(db, definition, {
+          actor,
+          id: params.id ?? '',
+          ifMatch,
+          spec: body.spec,
+          note: body.note,
+        }),
     }),
     accountRoute({
       method: 'get',

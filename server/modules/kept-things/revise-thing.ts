@@ -25,7 +25,13 @@ export async function reviseThing<Spec>(
     if (!base) throw notFound();
     if (base.revision.id !== ifMatch) throw editedMeanwhile(base);
     await definition.check(tx, accountId, spec);
-    const thing = await insertRevision(tx, definition.tables, { accountId, spec, note, createdBy: userId, base });
+    const thing = await insertRevision(tx, definition.tables, {
+      accountId,
+      spec,
+      note,
+      createdBy: userId,
+      base,
+    });
     await recordAuditEntry(tx, {
       accountId,
       actorUserId: userId,

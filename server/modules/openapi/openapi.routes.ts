@@ -2,10 +2,16 @@ import { closedObject } from '../../../shared/contract/fields';
 import { publicRoute, type RouteDefinition } from '../../http/route-definition';
 import { writeDocument } from './write-document';
 
-export const OPENAPI_PATH = '/api/openapi.json';
+const OPENAPI_PATH = '/api/openapi.json';
 
 /** The document describes all routes, itself included, so it takes them when they are all there. */
-export function openApiRoutes({ routes, version }: { routes: readonly RouteDefinition[]; version: string }): RouteDefinition[] {
+export function openApiRoutes({
+  routes,
+  version,
+}: {
+  routes: readonly RouteDefinition[];
+  version: string;
+}): RouteDefinition[] {
   const own = publicRoute({
     method: 'get',
     path: OPENAPI_PATH,

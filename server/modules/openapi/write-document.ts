@@ -5,7 +5,12 @@ import { healthResponseSchema } from '../../../shared/contract/health';
 import { materialSpecSchema } from '../../../shared/contract/materials';
 import { sessionResponseSchema } from '../../../shared/contract/session';
 import { layerSchema } from '../../../shared/contract/storage-description';
-import { candidateSchema, studyResultSchema, studySchema, studyWithResultSchema } from '../../../shared/contract/study-answers';
+import {
+  candidateSchema,
+  studyResultSchema,
+  studySchema,
+  studyWithResultSchema,
+} from '../../../shared/contract/study-answers';
 import { STATUS_BY_CODE, type ErrorCode } from '../../../shared/errors/error-code';
 import type { Access, RouteDefinition } from '../../http/route-definition';
 import { JsonSchemaWriter, type JsonSchema } from './yup-to-json-schema';
@@ -56,7 +61,13 @@ const ERROR_SCHEMA: JsonSchema = {
 };
 
 /** The OpenAPI 3.1 document of the routes: what is not in it is not served, and the other way round. */
-export function writeDocument({ routes, version }: { routes: readonly RouteDefinition[]; version: string }): JsonSchema {
+export function writeDocument({
+  routes,
+  version,
+}: {
+  routes: readonly RouteDefinition[];
+  version: string;
+}): JsonSchema {
   const writer = new JsonSchemaWriter(COMPONENTS);
   const paths: Record<string, Record<string, JsonSchema>> = {};
   for (const route of routes) {
@@ -94,13 +105,18 @@ function operationOf(route: RouteDefinition, writer: JsonSchemaWriter): JsonSche
 }
 
 function operationId({ method, path }: RouteDefinition): string {
-  const words = path.replace(/^\/api\//, '').replace(/:/g, 'by_').split(/[/_.-]+/);
+  const words = path
+    .replace(/^\/api\//, '')
+    .replace(/:/g, 'by_')
+    .split(/[/_.-]+/);
   return method + words.map((word) => word.charAt(0).toUpperCase() + word.slice(1)).join('');
 }
 
 function accessInWords(access: Access): string {
   if (access.kind === 'public') return 'Open to anybody.';
-  return access.kind === 'signed in' ? 'For whoever is signed in.' : `For the roles ${access.roles.join(' and ')}.`;
+  return access.kind === 'signed in'
+    ? 'For whoever is signed in.'
+    : `For the roles ${access.roles.join(' and ')}.`;
 }
 
 function pathParameters({ path }: RouteDefinition): JsonSchema[] {
@@ -115,7 +131,12 @@ function pathParameters({ path }: RouteDefinition): JsonSchema[] {
 function queryParameters({ querySchema }: RouteDefinition, writer: JsonSchemaWriter): JsonSchema[] {
   if (!querySchema) return [];
   const { properties } = writer.write(querySchema);
-  return Object.entries(properties ?? {}).map(([name, schema]) => ({ name, in: 'query', required: false, schema }));
+  return Object.entries(properties ?? {}).map(([name, schema]) => ({
+    name,
+    in: 'query',
+    required: false,
+    schema,
+  }));
 }
 
 function headerParameters({ wants }: RouteDefinition): JsonSchema[] {
@@ -128,7 +149,10 @@ function successes({ responses }: RouteDefinition, writer: JsonSchemaWriter): Js
   return Object.fromEntries(
     Object.entries(responses).map(([status, schema]) => [
       status,
-      { description: SUCCESS_WORDS[status] ?? 'Done.', ...(schema && { content: jsonContent(writer.write(schema)) }) },
+      {
+        description: SUCCESS_WORDS[status] ?? 'Done.',
+        ...(schema && { content: jsonContent(writer.write(schema)) }),
+      },
     ]),
   );
 }

@@ -1,4 +1,13 @@
-import { ArraySchema, BooleanSchema, MixedSchema, NumberSchema, ObjectSchema, StringSchema, type Lazy, type Schema } from 'yup';
+import {
+  ArraySchema,
+  BooleanSchema,
+  MixedSchema,
+  NumberSchema,
+  ObjectSchema,
+  StringSchema,
+  type Lazy,
+  type Schema,
+} from 'yup';
 import {
   LIMIT_ANSWER_SCHEMAS,
   limitAnswerSchema,
@@ -8,7 +17,12 @@ import {
 import { TEST_SCHEMAS, transmissionTestSchema } from '../../../shared/contract/evaluations';
 import { MATERIAL_SCHEMAS, materialSpecSchema } from '../../../shared/contract/materials';
 import { PACK_FORM_SCHEMAS, packFormSchema } from '../../../shared/contract/packs';
-import { ISOTHERM_SCHEMAS, isothermSchema, LAYER_SCHEMAS, layerSchema } from '../../../shared/contract/storage-description';
+import {
+  ISOTHERM_SCHEMAS,
+  isothermSchema,
+  LAYER_SCHEMAS,
+  layerSchema,
+} from '../../../shared/contract/storage-description';
 
 export type JsonSchema = Record<string, unknown>;
 type AnySchema = Schema<unknown> | Lazy<unknown>;
@@ -90,7 +104,8 @@ function isRequired(field: AnySchema): boolean {
 
 function nullable(schema: Schema<unknown>, described: JsonSchema): JsonSchema {
   if (!schema.spec.nullable) return described;
-  if (typeof described.type === 'string' && described.enum === undefined) return { ...described, type: [described.type, 'null'] };
+  if (typeof described.type === 'string' && described.enum === undefined)
+    return { ...described, type: [described.type, 'null'] };
   return { anyOf: [described, { type: 'null' }] };
 }
 
@@ -143,7 +158,12 @@ function lengthBounds(schema: Schema<unknown>, noun: 'Length' | 'Items'): JsonSc
     described(schema).tests.flatMap(({ name, params }): [string, unknown][] => {
       if (name === 'min') return [[`min${noun}`, params?.min]];
       if (name === 'max') return [[`max${noun}`, params?.max]];
-      return name === 'length' ? [[`min${noun}`, params?.length], [`max${noun}`, params?.length]] : [];
+      return name === 'length'
+        ? [
+            [`min${noun}`, params?.length],
+            [`max${noun}`, params?.length],
+          ]
+        : [];
     }),
   );
 }

@@ -14,10 +14,15 @@ export async function redeemReset(
 ): Promise<Answer> {
   const passwordHash = await hashPassword(password);
   await db.transaction(async (tx) => {
-    const isValid = and(eq(passwordResetTokens.tokenSha256, sha256Hex(token)), gt(passwordResetTokens.expiresAt, new Date()));
+    const isValid = and(
+      eq(passwordResetTokens.tokenSha256, sha256Hex(token)),
+      gt(passwordResetTokens.expiresAt, new Date()),
+    );
     const [redeemed] = await tx.delete(passwordResetTokens).where(isValid).returning();
     if (!redeemed) {
-      throw inputInvalid([{ path: 'token', message: 'This link was used or is older than an hour. Ask for a new one.' }]);
+      throw inputInvalid([
+        { path: 'token', message: 'This link was used or is older than an hour. Ask for a new one.' },
+      ]);
     }
     const { userId } = redeemed;
     await tx.update(users).set({ passwordHash }).where(eq(users.id, userId));

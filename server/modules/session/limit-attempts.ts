@@ -31,7 +31,10 @@ export interface CountedAttempt {
  * Writes the attempt down before it is made, so that many at once are all counted, then refuses it when there were
  * too many: for this e-mail address or from this network address. Both stand there as SHA-256 and are purged.
  */
-export async function countAttempt(db: Database, { kind, email, networkAddress }: Attempt): Promise<CountedAttempt> {
+export async function countAttempt(
+  db: Database,
+  { kind, email, networkAddress }: Attempt,
+): Promise<CountedAttempt> {
   const emailSha256 = sha256Hex(`email ${email.toLowerCase()}`);
   const networkSha256 = sha256Hex(`network ${networkAddress}`);
   const networkAttemptId = newId();
@@ -44,7 +47,10 @@ export async function countAttempt(db: Database, { kind, email, networkAddress }
   return { kind, emailSha256, networkAttemptId };
 }
 
-async function refuseBeyond(db: Database, { kind, sha256, limit }: { kind: AttemptKind; sha256: string; limit: number }) {
+async function refuseBeyond(
+  db: Database,
+  { kind, sha256, limit }: { kind: AttemptKind; sha256: string; limit: number },
+) {
   const since = new Date(Date.now() - WINDOW_MS);
   const [found] = await db
     .select({ made: count(), firstAt: min(attempts.at) })
@@ -63,5 +69,7 @@ function tooManyAttempts(firstAt: Date | null): AppError {
   const elapsedMs = firstAt === null ? 0 : Date.now() - new Date(firstAt).getTime();
   const retryAfterS = Math.max(1, Math.ceil((WINDOW_MS - elapsedMs) / 1000));
   const minutes = Math.ceil(retryAfterS / 60);
-  return new AppError('too_many_requests', `Too many attempts. Try again in ${minutes} min.`, { retryAfterS });
+  return new AppError('too_many_requests', `Too many attempts. Try again in ${minutes} min.`, {
+    retryAfterS,
+  });
 }

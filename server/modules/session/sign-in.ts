@@ -22,7 +22,10 @@ export async function signIn(
   const credentials = await findCredentials(db, email);
   const isRight = await verifyPassword(credentials?.passwordHash, password);
   if (!isRight || !credentials) {
-    throw new AppError('sign_in_refused', 'E-mail and password do not fit together. Check both, or ask for a new password.');
+    throw new AppError(
+      'sign_in_refused',
+      'E-mail and password do not fit together. Check both, or ask for a new password.',
+    );
   }
   await forgetAttempts(db, attempt);
   const setCookie = await sessions.open(credentials.userId);

@@ -18,12 +18,19 @@ export async function computeCandidate(
   return { description: withCourses, answer: await engine.evaluate(withCourses) };
 }
 
-function reportDays({ target_days, horizon_days }: EvaluationDescription, answer: EvaluationAnswer): number[] {
-  const reached = Object.values(answer.limits).flatMap((limit) => (limit.status === 'reached' ? [limit.days] : []));
+function reportDays(
+  { target_days, horizon_days }: EvaluationDescription,
+  answer: EvaluationAnswer,
+): number[] {
+  const reached = Object.values(answer.limits).flatMap((limit) =>
+    limit.status === 'reached' ? [limit.days] : [],
+  );
   // A limit far beyond target and life would squeeze what matters into a corner.
   const mattering = [target_days ?? 0, answer.shelf_life_days ?? 0];
   const near = reached.filter((days) => days <= 3 * Math.max(...mattering));
   const wished = ROOM * Math.max(1, ...mattering, ...near);
   const lastDay = Math.min(horizon_days, wished);
-  return Array.from({ length: COURSE_POINTS + 1 }, (_, i) => Number(((lastDay * i) / COURSE_POINTS).toPrecision(12)));
+  return Array.from({ length: COURSE_POINTS + 1 }, (_, i) =>
+    Number(((lastDay * i) / COURSE_POINTS).toPrecision(12)),
+  );
 }

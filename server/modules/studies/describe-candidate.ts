@@ -19,10 +19,18 @@ interface Layer extends LaminateLayer {
 /** What the engine is asked about one laminate of a study. */
 export function describeCandidate(
   laminate: KeptThing<LaminateSpec>,
-  { food, pack, route, materialRevisions }: Pick<StudyInputs, 'food' | 'pack' | 'route' | 'materialRevisions'>,
+  {
+    food,
+    pack,
+    route,
+    materialRevisions,
+  }: Pick<StudyInputs, 'food' | 'pack' | 'route' | 'materialRevisions'>,
   targetDays: number,
 ): { description: EvaluationDescription; layers: CandidateLayer[] } {
-  const layers = laminate.revision.spec.layers.map((layer) => ({ ...layer, material: pinnedSpec(layer, materialRevisions) }));
+  const layers = laminate.revision.spec.layers.map((layer) => ({
+    ...layer,
+    material: pinnedSpec(layer, materialRevisions),
+  }));
   const foodSpec = food.revision.spec;
   const description: EvaluationDescription = {
     pack: describePack(pack.revision.spec, layers),
@@ -36,7 +44,10 @@ export function describeCandidate(
   return { description, layers: layers.map(candidateLayer) };
 }
 
-function pinnedSpec(layer: LaminateLayer, revisions: ReadonlyMap<string, Revision<MaterialSpec>>): MaterialSpec {
+function pinnedSpec(
+  layer: LaminateLayer,
+  revisions: ReadonlyMap<string, Revision<MaterialSpec>>,
+): MaterialSpec {
   const revision = revisions.get(layer.material_revision_id);
   if (!revision) throw new Error(`Material revision ${layer.material_revision_id} is pinned but missing.`);
   return revision.spec;
@@ -61,7 +72,8 @@ function describePack(spec: PackSpec, layers: readonly Layer[]): EvaluationDescr
 
 function describeLayer({ material, thickness_um }: Layer): LayerDescription {
   const { name } = material;
-  if (material.kind === 'foil') return { kind: 'foil', name, thickness_um, defects: material.defects ?? undefined };
+  if (material.kind === 'foil')
+    return { kind: 'foil', name, thickness_um, defects: material.defects ?? undefined };
   if (material.kind === 'film') {
     return { kind: 'film', name, thickness_um, oxygen: material.oxygen.gas, water: material.water.gas };
   }
@@ -79,7 +91,10 @@ function describeLayer({ material, thickness_um }: Layer): LayerDescription {
  * Gas creeps edgewise through both sealant layers: the innermost film, twice. Seals of unequal width conduct as one
  * of width Σ length / Σ (length / width). Without a film inside there is no sealant to creep through.
  */
-function describeSeal({ form, has_seal_path }: PackSpec, layers: readonly Layer[]): SealDescription | undefined {
+function describeSeal(
+  { form, has_seal_path }: PackSpec,
+  layers: readonly Layer[],
+): SealDescription | undefined {
   const innermost = layers.at(-1);
   if (!has_seal_path || form.type !== 'pouch' || innermost?.material.kind !== 'film') return undefined;
   const { seal_length_m, seal_length_over_width } = pouchArea(form);
@@ -98,8 +113,15 @@ function describeSeal({ form, has_seal_path }: PackSpec, layers: readonly Layer[
 const COEFFICIENT_FIELD = /^(oxygen|water|pinholes|defects|derivation)\b/;
 const WEAK_KINDS = ['memory', 'invented', 'common-practice'] as const;
 
-function candidateLayer({ material, material_id, material_revision_id, thickness_um }: Layer): CandidateLayer {
-  const kinds = material.provenance.filter((entry) => COEFFICIENT_FIELD.test(entry.field)).map((entry) => entry.kind);
+function candidateLayer({
+  material,
+  material_id,
+  material_revision_id,
+  thickness_um,
+}: Layer): CandidateLayer {
+  const kinds = material.provenance
+    .filter((entry) => COEFFICIENT_FIELD.test(entry.field))
+    .map((entry) => entry.kind);
   return {
     material_id,
     material_revision_id,

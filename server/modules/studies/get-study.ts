@@ -6,7 +6,10 @@ import { notFound } from '../../http/app-error';
 import { findHeadlines, findLatestResult, findOutdatedResults } from './results.repository';
 import { TABLES } from './study-tables';
 
-export async function getStudy(db: Queryable, key: { accountId: string; id: string }): Promise<StudyWithResult> {
+export async function getStudy(
+  db: Queryable,
+  key: { accountId: string; id: string },
+): Promise<StudyWithResult> {
   const thing = await findThing(db, TABLES.studies, key);
   if (!thing) throw notFound();
   return withResult(db, key.accountId, thing);
@@ -30,15 +33,36 @@ export async function describeStudies(
 ): Promise<Study[]> {
   const specs = things.map((thing) => thing.revision.spec);
   const namesOf = async (collection: 'foods' | 'packs' | 'routes' | 'laminates', ids: readonly string[]) => {
-    const found: KeptThing<{ name: string }>[] = await findThings<{ name: string }>(db, TABLES[collection], { accountId, ids });
+    const found: KeptThing<{ name: string }>[] = await findThings<{ name: string }>(db, TABLES[collection], {
+      accountId,
+      ids,
+    });
     return new Map(found.map((thing) => [thing.id, thing.revision.spec.name]));
   };
-  const foodNames = await namesOf('foods', specs.map((spec) => spec.food_id));
-  const packNames = await namesOf('packs', specs.map((spec) => spec.pack_id));
-  const routeNames = await namesOf('routes', specs.map((spec) => spec.route_id));
-  const laminateNames = await namesOf('laminates', specs.flatMap((spec) => spec.laminate_ids));
-  const headlines = await findHeadlines(db, things.map((thing) => thing.id));
-  const outdated = await findOutdatedResults(db, [...headlines.values()].map((headline) => headline.result_id));
+  const foodNames = await namesOf(
+    'foods',
+    specs.map((spec) => spec.food_id),
+  );
+  const packNames = await namesOf(
+    'packs',
+    specs.map((spec) => spec.pack_id),
+  );
+  const routeNames = await namesOf(
+    'routes',
+    specs.map((spec) => spec.route_id),
+  );
+  const laminateNames = await namesOf(
+    'laminates',
+    specs.flatMap((spec) => spec.laminate_ids),
+  );
+  const headlines = await findHeadlines(
+    db,
+    things.map((thing) => thing.id),
+  );
+  const outdated = await findOutdatedResults(
+    db,
+    [...headlines.values()].map((headline) => headline.result_id),
+  );
   return things.map((thing) => {
     const { spec } = thing.revision;
     const headline = headlines.get(thing.id) ?? null;

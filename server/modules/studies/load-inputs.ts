@@ -30,17 +30,32 @@ export async function loadInputs(db: Queryable, accountId: string, spec: StudySp
   const laminates = spec.laminate_ids.map((id) => found.find((laminate) => laminate.id === id));
 
   const faults: FieldFault[] = [];
-  if (!food) faults.push({ path: 'spec.food_id', value: spec.food_id, message: 'Food: choose one of this account.' });
-  if (!pack) faults.push({ path: 'spec.pack_id', value: spec.pack_id, message: 'Pack: choose one of this account.' });
-  if (!route) faults.push({ path: 'spec.route_id', value: spec.route_id, message: 'Route: choose one of this account.' });
+  if (!food)
+    faults.push({ path: 'spec.food_id', value: spec.food_id, message: 'Food: choose one of this account.' });
+  if (!pack)
+    faults.push({ path: 'spec.pack_id', value: spec.pack_id, message: 'Pack: choose one of this account.' });
+  if (!route)
+    faults.push({
+      path: 'spec.route_id',
+      value: spec.route_id,
+      message: 'Route: choose one of this account.',
+    });
   laminates.forEach((laminate, i) => {
     if (laminate) return;
-    faults.push({ path: `spec.laminate_ids[${i}]`, value: spec.laminate_ids[i], message: 'Wall: choose one of this account.' });
+    faults.push({
+      path: `spec.laminate_ids[${i}]`,
+      value: spec.laminate_ids[i],
+      message: 'Wall: choose one of this account.',
+    });
   });
   if (!food || !pack || !route || faults.length > 0) throw inputInvalid(faults);
 
   const known = laminates.filter((laminate) => laminate !== undefined);
-  const ids = [...new Set(known.flatMap(({ revision }) => revision.spec.layers.map((layer) => layer.material_revision_id)))];
+  const ids = [
+    ...new Set(
+      known.flatMap(({ revision }) => revision.spec.layers.map((layer) => layer.material_revision_id)),
+    ),
+  ];
   const materials = await findRevisions(db, TABLES.materials, { accountId, ids });
   return {
     food,

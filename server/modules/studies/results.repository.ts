@@ -28,11 +28,17 @@ interface NewResult {
 
 /** Counts within the study, whose row is locked by whoever asks. */
 export async function nextResultNumber(tx: Transaction, studyId: string): Promise<number> {
-  const [last] = await tx.select({ number: max(results.number) }).from(results).where(eq(results.studyId, studyId));
+  const [last] = await tx
+    .select({ number: max(results.number) })
+    .from(results)
+    .where(eq(results.studyId, studyId));
   return (last?.number ?? 0) + 1;
 }
 
-export async function insertResult(tx: Transaction, { accountId, result, body, sha256, headline, pins }: NewResult) {
+export async function insertResult(
+  tx: Transaction,
+  { accountId, result, body, sha256, headline, pins }: NewResult,
+) {
   await tx.insert(results).values({
     id: result.id,
     accountId,
@@ -61,7 +67,12 @@ export async function findResult(
 }
 
 export async function findLatestResult(db: Queryable, studyId: string): Promise<StudyResult | null> {
-  const [row] = await db.select().from(results).where(eq(results.studyId, studyId)).orderBy(desc(results.number)).limit(1);
+  const [row] = await db
+    .select()
+    .from(results)
+    .where(eq(results.studyId, studyId))
+    .orderBy(desc(results.number))
+    .limit(1);
   return row ? asStudyResult(row) : null;
 }
 
@@ -86,7 +97,10 @@ export async function listResults(
 }
 
 /** By study: the headline of its latest result. */
-export async function findHeadlines(db: Queryable, studyIds: readonly string[]): Promise<Map<string, StudyHeadline>> {
+export async function findHeadlines(
+  db: Queryable,
+  studyIds: readonly string[],
+): Promise<Map<string, StudyHeadline>> {
   if (studyIds.length === 0) return new Map();
   const rows = await db
     .selectDistinctOn([results.studyId], {

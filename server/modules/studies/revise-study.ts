@@ -27,7 +27,13 @@ export async function reviseStudy(
     const base = await lockThing(tx, TABLES.studies, { accountId, id });
     if (!base) throw notFound();
     if (base.revision.id !== ifMatch) throw editedMeanwhile(await withResult(tx, accountId, base));
-    const study = await insertRevision(tx, TABLES.studies, { accountId, spec, note, createdBy: userId, base });
+    const study = await insertRevision(tx, TABLES.studies, {
+      accountId,
+      spec,
+      note,
+      createdBy: userId,
+      base,
+    });
     await runStudy(tx, engine, { actor, study });
     await recordAuditEntry(tx, {
       accountId,

@@ -51,7 +51,11 @@ export async function runStudy(
   return { ...unsigned, sha256: sha256.toString('hex') };
 }
 
-function computeCandidates(engine: EnginePort, inputs: StudyInputs, targetDays: number): Promise<Candidate[]> {
+function computeCandidates(
+  engine: EnginePort,
+  inputs: StudyInputs,
+  targetDays: number,
+): Promise<Candidate[]> {
   return Promise.all(
     inputs.laminates.map(async (laminate, i) => {
       const { description, layers } = describeCandidate(laminate, inputs, targetDays);
@@ -72,7 +76,9 @@ function computeCandidates(engine: EnginePort, inputs: StudyInputs, targetDays: 
 /** What the engine refuses belongs to one of the things that the study chose. */
 function asFieldFault(error: InputError, laminateIndex: number) {
   const value = typeof error.value === 'object' ? undefined : error.value;
-  return inputInvalid([{ path: chosenField(error.path, laminateIndex), value, message: `${error.path}: ${error.message}` }]);
+  return inputInvalid([
+    { path: chosenField(error.path, laminateIndex), value, message: `${error.path}: ${error.message}` },
+  ]);
 }
 
 function chosenField(path: string, laminateIndex: number): string {

@@ -55,7 +55,8 @@ export function studyRoutes(deps: { db: Database; engine: EnginePort }): RouteDe
       wants: 'idempotency-key',
       requestSchema: createSchema,
       responses: { 201: studyWithResultSchema },
-      handle: ({ actor, body, once }) => createOnce(db, once, (tx) => createStudy(tx, engine, { actor, spec: body.spec })),
+      handle: ({ actor, body, once }) =>
+        createOnce(db, once, (tx) => createStudy(tx, engine, { actor, spec: body.spec })),
     }),
     accountRoute({
       method: 'get',
@@ -123,7 +124,11 @@ export function studyRoutes(deps: { db: Database; engine: EnginePort }): RouteDe
       roles: READERS,
       responses: { 200: studyResultSchema },
       async handle({ actor: { accountId }, params }) {
-        const result = await findResult(db, { accountId, studyId: params.id ?? '', id: params.result_id ?? '' });
+        const result = await findResult(db, {
+          accountId,
+          studyId: params.id ?? '',
+          id: params.result_id ?? '',
+        });
         if (!result) throw notFound();
         return { status: 200, body: result };
       },

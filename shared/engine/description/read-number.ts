@@ -1,8 +1,9 @@
 import { InputError } from './input-error';
 import type { NumericRange } from './ranges';
 
-/** What a number is called in messages, and the unit printed behind it. */
-export interface NumberWords {
+/** What a number may be, what it is called in messages, and the unit printed behind it. */
+export interface NumberRule {
+  range: NumericRange;
   label: string;
   unit?: string;
 }
@@ -18,37 +19,34 @@ export function rangeInWords(range: NumericRange, unit?: string): string {
 }
 
 /** A finite number within a range; InputError with path, value and remedy otherwise. */
-export function readNumber(value: unknown, path: string, range: NumericRange, words: NumberWords): number {
-  const use = rangeInWords(range, words.unit);
+export function readNumber(value: unknown, path: string, rule: NumberRule): number {
+  const { range, label, unit } = rule;
+  const use = rangeInWords(range, unit);
   if (value === undefined || value === null) {
-    throw new InputError(path, value ?? null, `${words.label} is missing: give ${use}.`);
+    throw new InputError(path, value ?? null, `${label} is missing: give ${use}.`);
   }
   if (typeof value !== 'number' || !Number.isFinite(value)) {
-    throw new InputError(path, String(value), `${words.label} must be a number, ${use}.`);
+    throw new InputError(path, String(value), `${label} must be a number, ${use}.`);
   }
   const isAboveMin = range.isMinExcluded ? value > range.min : value >= range.min;
   if (!isAboveMin || value > range.max) {
-    throw new InputError(
-      path,
-      value,
-      `${words.label} ${withUnit(value, words.unit)} does not fit; use ${use}.`,
-    );
+    throw new InputError(path, value, `${label} ${withUnit(value, unit)} does not fit; use ${use}.`);
   }
   return value;
 }
 
 /** As readNumber, with a value to use where none is given. */
-export function readOptional(
-  value: unknown,
-  path: string,
-  range: NumericRange,
-  words: NumberWords & { otherwise: number },
-): number {
-  return value === undefined || value === null ? words.otherwise : readNumber(value, path, range, words);
+export function readOptional(value: unknown, path: string, rule: NumberRule & { otherwise: number }): number {
+  return value === undefined || value === null ? rule.otherwise : readNumber(value, path, rule);
 }
 
 /** A list within a count; InputError otherwise. */
-export function readList<Item>(value: unknown, path: string, range: NumericRange, label: string): Item[] {
+export function readList<Item>(
+  value: unknown,
+  path: string,
+  rule: { range: NumericRange; label: string },
+): Item[] {
+  const { range, label } = rule;
   if (!Array.isArray(value)) throw new InputError(path, describe(value), `${label}: a list is needed.`);
   if (value.length < range.min) {
     throw new InputError(
@@ -79,9 +77,9 @@ export function readObject<Shape extends object>(value: unknown, path: string, l
 export function readChoice<Choice extends string>(
   value: unknown,
   path: string,
-  choices: readonly Choice[],
-  label: string,
+  rule: { choices: readonly Choice[]; label: string },
 ): Choice {
+  const { choices, label } = rule;
   const found = choices.find((choice) => choice === value);
   if (found === undefined) {
     throw new InputError(

@@ -24,8 +24,12 @@ import type {
 /** A pack in SI. Errors: InputError with the path in the description. */
 export function readPack(value: unknown, path: string): Pack {
   const pack = readObject<PackDescription>(value, path, 'Pack');
-  const walls = readList<WallDescription>(pack.walls, `${path}.walls`, WALL_COUNT, 'Walls of a pack');
-  const headspaceCm3 = readOptional(pack.headspace_cm3, `${path}.headspace_cm3`, HEADSPACE_CM3, {
+  const walls = readList<WallDescription>(pack.walls, `${path}.walls`, {
+    range: WALL_COUNT,
+    label: 'Walls of a pack',
+  });
+  const headspaceCm3 = readOptional(pack.headspace_cm3, `${path}.headspace_cm3`, {
+    range: HEADSPACE_CM3,
     label: 'Headspace',
     unit: 'cm³',
     otherwise: 0,
@@ -33,8 +37,7 @@ export function readPack(value: unknown, path: string): Pack {
   const startingPercent = readOptional(
     pack.starting_headspace_oxygen_percent,
     `${path}.starting_headspace_oxygen_percent`,
-    PERCENT,
-    { label: 'Oxygen in the headspace at packing', unit: '%', otherwise: 0 },
+    { range: PERCENT, label: 'Oxygen in the headspace at packing', unit: '%', otherwise: 0 },
   );
   return {
     walls: walls.map((wall, i) => readWall(wall, `${path}.walls[${i}]`)),
@@ -49,7 +52,7 @@ function readWall(value: unknown, path: string): Wall {
   const wall = readObject<WallDescription>(value, path, 'Wall');
   return {
     name: typeof wall.name === 'string' && wall.name !== '' ? wall.name : 'wall',
-    areaM2: readNumber(wall.area_m2, `${path}.area_m2`, AREA_M2, { label: 'Area', unit: 'm²' }),
+    areaM2: readNumber(wall.area_m2, `${path}.area_m2`, { range: AREA_M2, label: 'Area', unit: 'm²' }),
     layers: readLayers(wall.layers, `${path}.layers`),
   };
 }
@@ -57,25 +60,18 @@ function readWall(value: unknown, path: string): Wall {
 function readSeal(value: unknown, path: string): Seal | null {
   if (value === undefined || value === null) return null;
   const seal = readObject<SealDescription>(value, path, 'Seal');
-  const sealantUm = readNumber(
-    seal.sealant_thickness_um,
-    `${path}.sealant_thickness_um`,
-    COATING_THICKNESS_UM,
-    {
-      label: 'Sealant thickness',
-      unit: 'µm',
-    },
-  );
-  const lengthMm = readNumber(
-    seal.length_mm,
-    `${path}.length_mm`,
-    { ...LENGTH_MM, isMinExcluded: false },
-    {
-      label: 'Seal length',
-      unit: 'mm',
-    },
-  );
-  const widthMm = readNumber(seal.width_mm, `${path}.width_mm`, LENGTH_MM, {
+  const sealantUm = readNumber(seal.sealant_thickness_um, `${path}.sealant_thickness_um`, {
+    range: COATING_THICKNESS_UM,
+    label: 'Sealant thickness',
+    unit: 'µm',
+  });
+  const lengthMm = readNumber(seal.length_mm, `${path}.length_mm`, {
+    range: { ...LENGTH_MM, isMinExcluded: false },
+    label: 'Seal length',
+    unit: 'mm',
+  });
+  const widthMm = readNumber(seal.width_mm, `${path}.width_mm`, {
+    range: LENGTH_MM,
     label: 'Seal width',
     unit: 'mm',
   });
@@ -100,12 +96,16 @@ function readLeaks(value: unknown, path: string): Leaks | null {
   if (value === undefined || value === null) return null;
   const leaks = readObject<LeaksDescription>(value, path, 'Leaks');
   return {
-    count: readNumber(leaks.count, `${path}.count`, LEAK_COUNT, { label: 'Leak channels' }),
+    count: readNumber(leaks.count, `${path}.count`, { range: LEAK_COUNT, label: 'Leak channels' }),
     lengthM:
-      readNumber(leaks.length_mm, `${path}.length_mm`, LENGTH_MM, { label: 'Length of a leak', unit: 'mm' }) *
-      1e-3,
+      readNumber(leaks.length_mm, `${path}.length_mm`, {
+        range: LENGTH_MM,
+        label: 'Length of a leak',
+        unit: 'mm',
+      }) * 1e-3,
     diameterM:
-      readNumber(leaks.diameter_um, `${path}.diameter_um`, HOLE_DIAMETER_UM, {
+      readNumber(leaks.diameter_um, `${path}.diameter_um`, {
+        range: HOLE_DIAMETER_UM,
         label: 'Diameter of a leak',
         unit: 'µm',
       }) * 1e-6,

@@ -51,14 +51,16 @@ export const uptakeMgPerKg = (mol: number, massKg: number): number =>
 /** A storage description in SI. Errors: InputError with path, value and remedy; nothing is corrected silently. */
 export function readStorage(description: StorageDescription): StorageSystem {
   const given = readObject<StorageDescription>(description, '', 'Description');
-  const totalPressurePa = readOptional(given.total_pressure_Pa, 'total_pressure_Pa', TOTAL_PRESSURE_PA, {
+  const totalPressurePa = readOptional(given.total_pressure_Pa, 'total_pressure_Pa', {
+    range: TOTAL_PRESSURE_PA,
     label: 'Total pressure',
     unit: 'Pa',
     otherwise: ATMOSPHERE_PA,
   });
   const pack = readPack(given.pack, 'pack');
   const food = readFood(given.food);
-  const horizonDays = readNumber(given.horizon_days, 'horizon_days', HORIZON_DAYS, {
+  const horizonDays = readNumber(given.horizon_days, 'horizon_days', {
+    range: HORIZON_DAYS,
     label: 'Horizon',
     unit: 'days',
   });
@@ -67,7 +69,8 @@ export function readStorage(description: StorageDescription): StorageSystem {
     pack,
     food,
     absorberMol:
-      readOptional(given.absorber_capacity_cm3_STP, 'absorber_capacity_cm3_STP', ABSORBER_CM3_STP, {
+      readOptional(given.absorber_capacity_cm3_STP, 'absorber_capacity_cm3_STP', {
+        range: ABSORBER_CM3_STP,
         label: 'Absorber capacity',
         unit: 'cm³(STP)',
         otherwise: 0,
@@ -86,52 +89,55 @@ export function readStorage(description: StorageDescription): StorageSystem {
 /** Days at which courses are wanted, as given. */
 export function readReportDays(value: unknown, horizonDays: number): number[] {
   if (value === undefined || value === null) return [];
-  const days = readList<number>(value, 'report_days', REPORT_DAY_COUNT, 'Report days');
+  const days = readList<number>(value, 'report_days', { range: REPORT_DAY_COUNT, label: 'Report days' });
   return days.map((day, i) =>
-    readNumber(day, `report_days[${i}]`, { min: 0, max: horizonDays }, { label: 'Report day', unit: 'days' }),
+    readNumber(day, `report_days[${i}]`, {
+      range: { min: 0, max: horizonDays },
+      label: 'Report day',
+      unit: 'days',
+    }),
   );
 }
 
 function readFood(value: unknown): Food {
   const food = readObject<FoodDescription>(value, 'food', 'Food');
-  const mode = readChoice(
-    food.oxygen_mode,
-    'food.oxygen_mode',
-    ['at_once', 'none', 'rate'] as const,
-    'Oxygen mode',
-  );
+  const mode = readChoice(food.oxygen_mode, 'food.oxygen_mode', {
+    choices: ['at_once', 'none', 'rate'] as const,
+    label: 'Oxygen mode',
+  });
   const hasIsotherm = food.isotherm !== undefined && food.isotherm !== null;
-  const referenceC = readOptional(
-    food.rate_reference_temperature_C,
-    'food.rate_reference_temperature_C',
-    REFERENCE_TEMPERATURE_C,
-    { label: 'Reference temperature of the rate', unit: '°C', otherwise: 23 },
-  );
+  const referenceC = readOptional(food.rate_reference_temperature_C, 'food.rate_reference_temperature_C', {
+    range: REFERENCE_TEMPERATURE_C,
+    label: 'Reference temperature of the rate',
+    unit: '°C',
+    otherwise: 23,
+  });
   return {
-    massKg: readNumber(food.mass_kg, 'food.mass_kg', MASS_KG, { label: 'Food mass', unit: 'kg' }),
+    massKg: readNumber(food.mass_kg, 'food.mass_kg', { range: MASS_KG, label: 'Food mass', unit: 'kg' }),
     oxygenMode: mode,
     rateConstantSi:
       mode === 'rate'
-        ? readNumber(
-            food.rate_constant_mol_per_kg_s_Pa,
-            'food.rate_constant_mol_per_kg_s_Pa',
-            RATE_CONSTANT,
-            {
-              label: 'Rate constant of oxygen uptake',
-              unit: 'mol/(kg·s·Pa)',
-            },
-          )
+        ? readNumber(food.rate_constant_mol_per_kg_s_Pa, 'food.rate_constant_mol_per_kg_s_Pa', {
+            range: RATE_CONSTANT,
+            label: 'Rate constant of oxygen uptake',
+            unit: 'mol/(kg·s·Pa)',
+          })
         : 0,
     rateEnergyJPerMol: readOptional(
       food.rate_activation_energy_J_per_mol,
       'food.rate_activation_energy_J_per_mol',
-      ACTIVATION_ENERGY_J_PER_MOL,
-      { label: 'Activation energy of the rate', unit: 'J/mol', otherwise: 0 },
+      {
+        range: ACTIVATION_ENERGY_J_PER_MOL,
+        label: 'Activation energy of the rate',
+        unit: 'J/mol',
+        otherwise: 0,
+      },
     ),
     rateReferenceK: referenceC + ZERO_CELSIUS_K,
     isotherm: hasIsotherm ? readIsotherm(food.isotherm, 'food.isotherm') : null,
     initialMoisture: hasIsotherm
-      ? readNumber(food.initial_moisture_g_per_g, 'food.initial_moisture_g_per_g', MOISTURE_G_PER_G, {
+      ? readNumber(food.initial_moisture_g_per_g, 'food.initial_moisture_g_per_g', {
+          range: MOISTURE_G_PER_G,
           label: 'Moisture at packing',
           unit: 'g/g',
         })
@@ -144,18 +150,23 @@ function readFood(value: unknown): Food {
 
 function readRoute(value: unknown, horizonDays: number): { legs: Leg[]; isRepeated: boolean } {
   const route = readObject<RouteDescription>(value, 'route', 'Route');
-  const after = readChoice(
-    route.after_last,
-    'route.after_last',
-    ['hold', 'repeat'] as const,
-    'What follows the last leg',
-  );
-  const list = readList<LegDescription>(route.legs, 'route.legs', LEG_COUNT, 'Legs of a route');
+  const after = readChoice(route.after_last, 'route.after_last', {
+    choices: ['hold', 'repeat'] as const,
+    label: 'What follows the last leg',
+  });
+  const list = readList<LegDescription>(route.legs, 'route.legs', {
+    range: LEG_COUNT,
+    label: 'Legs of a route',
+  });
   let cycleDays = 0;
   const legs = list.map((item, i): Leg => {
     const path = `route.legs[${i}]`;
     const leg = readObject<LegDescription>(item, path, 'Leg');
-    const days = readNumber(leg.days, `${path}.days`, LEG_DAYS, { label: 'Length of a leg', unit: 'days' });
+    const days = readNumber(leg.days, `${path}.days`, {
+      range: LEG_DAYS,
+      label: 'Length of a leg',
+      unit: 'days',
+    });
     cycleDays += days;
     return {
       name: typeof leg.name === 'string' && leg.name !== '' ? leg.name : undefined,
@@ -193,19 +204,16 @@ function readLimits(
   }
   const limits: StorageSystem['limits'] = {};
   if (isGiven('oxygen_uptake_mg_per_kg')) {
-    const mgPerKg = readNumber(
-      given.oxygen_uptake_mg_per_kg,
-      'limits.oxygen_uptake_mg_per_kg',
-      UPTAKE_LIMIT_MG_PER_KG,
-      {
-        label: 'Oxygen uptake limit',
-        unit: 'mg/kg',
-      },
-    );
+    const mgPerKg = readNumber(given.oxygen_uptake_mg_per_kg, 'limits.oxygen_uptake_mg_per_kg', {
+      range: UPTAKE_LIMIT_MG_PER_KG,
+      label: 'Oxygen uptake limit',
+      unit: 'mg/kg',
+    });
     limits.oxygen_uptake_mg_per_kg = uptakeMol(mgPerKg, food.massKg);
   }
   if (isGiven('headspace_oxygen_percent')) {
-    const percent = readNumber(given.headspace_oxygen_percent, 'limits.headspace_oxygen_percent', PERCENT, {
+    const percent = readNumber(given.headspace_oxygen_percent, 'limits.headspace_oxygen_percent', {
+      range: PERCENT,
       label: 'Headspace oxygen limit',
       unit: '%',
     });
@@ -221,7 +229,11 @@ function readLimits(
   for (const name of ['moisture_max_g_per_g', 'moisture_min_g_per_g'] as const) {
     if (!isGiven(name)) continue;
     const label = name === 'moisture_max_g_per_g' ? 'Upper moisture limit' : 'Lower moisture limit';
-    const moisture = readNumber(given[name], `limits.${name}`, MOISTURE_G_PER_G, { label, unit: 'g/g' });
+    const moisture = readNumber(given[name], `limits.${name}`, {
+      range: MOISTURE_G_PER_G,
+      label,
+      unit: 'g/g',
+    });
     if (!food.isotherm) {
       throw new InputError(
         `limits.${name}`,

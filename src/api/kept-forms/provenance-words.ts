@@ -35,8 +35,8 @@ function isCoefficient(field: string): boolean {
 export function provenanceFieldInWords(field: string): string {
   const [head = '', ...rest] = field.split('.');
   const tail = rest.join('.');
-  const named = tail === '' ? FIELD_WORDS[head] ?? spaced(head) : `${FIELD_WORDS[head] ?? spaced(head)}, ${fieldTail(tail)}`;
-  return named;
+  const headWords = FIELD_WORDS[head] ?? spaced(head);
+  return tail === '' ? headWords : `${headWords}, ${fieldTail(tail)}`;
 }
 
 function fieldTail(tail: string): string {
@@ -46,6 +46,7 @@ function fieldTail(tail: string): string {
 }
 
 const FIELD_WORDS: Record<string, string> = {
+  temperatureC: 'temperature',
   activationEnergyKjPerMol: 'activation energy',
   activation_energy_J_per_mol: 'activation energy',
   humidityCurve: 'humidity curve',

@@ -16,6 +16,6 @@ export function addressAfterCreating(
   return `${path}?${parameters.toString()}`;
 }
 
-export function isReturnAddress(returnTo: string | undefined, basePath: string): returnTo is string {
+function isReturnAddress(returnTo: string | undefined, basePath: string): returnTo is string {
   return returnTo !== undefined && returnTo.startsWith(`${basePath}/`) && !returnTo.includes('//');
 }

@@ -13,7 +13,11 @@ export function specDifferences(mine: unknown, theirs: unknown): SpecDifference[
   const paths = [...new Set([...own.keys(), ...other.keys()])];
   return paths
     .filter((path) => own.get(path) !== other.get(path))
-    .map((path) => ({ field: pathInWords(path), mine: own.get(path) ?? '–', theirs: other.get(path) ?? '–' }));
+    .map((path) => ({
+      field: pathInWords(path),
+      mine: own.get(path) ?? '–',
+      theirs: other.get(path) ?? '–',
+    }));
 }
 
 const LEFT_ASIDE = new Set(['typed', 'provenance']);

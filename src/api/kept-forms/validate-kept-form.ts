@@ -40,7 +40,10 @@ export interface FoundFault {
 }
 
 /** A message of the schema as the person should read it: in the unit that was typed, with what was typed. */
-export function inTypedUnits(fault: FoundFault, rules: Pick<KeptFormRules<never>, 'schema' | 'kindAt' | 'unitSystem'>): string {
+export function inTypedUnits(
+  fault: FoundFault,
+  rules: Pick<KeptFormRules<never>, 'schema' | 'kindAt' | 'unitSystem'>,
+): string {
   const { path, message, text, spec } = fault;
   const kind = rules.kindAt(path);
   if (kind === null || typeof text !== 'string') return message;

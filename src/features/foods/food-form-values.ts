@@ -1,20 +1,12 @@
 import { foodSpecSchema } from '../../../shared/contract/foods';
 import type { ProvenanceEntry } from '../../../shared/contract/materials';
-import type { OxygenMode } from '../../../shared/engine/description/storage-description';
+import type { LimitName, OxygenMode } from '../../../shared/engine/description/storage-description';
 import type { DisplayKindName, DisplayUnitSystem } from '../../../shared/units/format';
 import type { FoodSpec } from '../../api/kept-things-queries';
 import { FieldReader, fieldText } from '../../api/kept-forms/typed-quantity';
 import { validateKeptForm } from '../../api/kept-forms/validate-kept-form';
 
 export type MoistureModel = 'GAB' | 'linear' | 'held';
-
-const LIMIT_NAMES = [
-  'oxygen_uptake_mg_per_kg',
-  'headspace_oxygen_percent',
-  'moisture_max_g_per_g',
-  'moisture_min_g_per_g',
-] as const;
-type LimitField = (typeof LIMIT_NAMES)[number];
 
 export interface FoodFormValues {
   name: string;
@@ -29,7 +21,7 @@ export interface FoodFormValues {
     initial_moisture_g_per_g: string;
     inside_relative_humidity: string;
   };
-  limits: Record<LimitField, string>;
+  limits: Record<LimitName, string>;
   absorber_capacity_cm3_STP: string;
   cautions: string;
   notes: string;
@@ -38,6 +30,7 @@ export interface FoodFormValues {
 
 /** The provenance entry that the form itself keeps: where the limits come from. */
 const GROUND_FIELD = 'limits';
+const LIMIT_ENTRY = /limit|max[A-Z]|min[A-Z]|_max_|_min_/;
 
 export const NEW_FOOD: FoodSpec = {
   name: '',
@@ -89,7 +82,7 @@ export function foodFormValues(spec: FoodSpec, unitSystem: DisplayUnitSystem): F
 
 /** Where the limits come from: the form's own entry, or the weakest that came with the library. */
 export function groundOf(spec: Pick<FoodSpec, 'provenance'>): ProvenanceEntry | undefined {
-  const entries = spec.provenance.filter((entry) => /limit|max|min/i.test(entry.field));
+  const entries = spec.provenance.filter((entry) => LIMIT_ENTRY.test(entry.field));
   return (
     spec.provenance.find((entry) => entry.field === GROUND_FIELD) ??
     entries.find((entry) => entry.kind === 'memory' || entry.kind === 'common-practice') ??
@@ -104,52 +97,102 @@ export interface FoodFormContext {
 
 export function foodSpecFrom(values: FoodFormValues, { unitSystem, before }: FoodFormContext): FoodSpec {
   const reader = new FieldReader(unitSystem);
+  const food = foodDescriptionFrom(values, reader, before.food);
+  const limits = limitsFrom(values, reader, before.limits);
   return {
     name: values.name.trim(),
-    food: foodDescriptionFrom(values, reader, before.food),
-    limits: present({
-      oxygen_uptake_mg_per_kg: reader.read('limits.oxygen_uptake_mg_per_kg', values.limits.oxygen_uptake_mg_per_kg, {
-        kind: 'oxygen_uptake_mg_per_kg',
-        before: before.limits.oxygen_uptake_mg_per_kg,
-      }),
-      headspace_oxygen_percent: reader.read('limits.headspace_oxygen_percent', values.limits.headspace_oxygen_percent, {
-        kind: 'percent',
-        before: before.limits.headspace_oxygen_percent,
-      }),
-      // Without an isotherm the food's moisture is not followed, so there is no moisture to limit.
-      moisture_max_g_per_g:
-        values.moisture_model === 'held'
-          ? undefined
-          : reader.read('limits.moisture_max_g_per_g', values.limits.moisture_max_g_per_g, {
-              kind: 'moisture_g_per_g',
-              before: before.limits.moisture_max_g_per_g,
-            }),
-      moisture_min_g_per_g:
-        values.moisture_model === 'held'
-          ? undefined
-          : reader.read('limits.moisture_min_g_per_g', values.limits.moisture_min_g_per_g, {
-              kind: 'moisture_g_per_g',
-              before: before.limits.moisture_min_g_per_g,
-            }),
-    }),
-    absorber_capacity_cm3_STP: reader.readRequired('absorber_capacity_cm3_STP', values.absorber_capacity_cm3_STP, {
-      kind: 'gas_amount_cm3_STP',
-      before: before.absorber_capacity_cm3_STP,
-    }),
+    food,
+    limits,
+    absorber_capacity_cm3_STP: reader.readRequired(
+      'absorber_capacity_cm3_STP',
+      values.absorber_capacity_cm3_STP,
+      {
+        kind: 'gas_amount_cm3_STP',
+        before: before.absorber_capacity_cm3_STP,
+      },
+    ),
     cautions: values.cautions
       .split('\n')
       .map((line) => line.trim())
       .filter((line) => line !== ''),
     notes: values.notes,
-    provenance: [
-      ...before.provenance.filter((entry) => entry.field !== GROUND_FIELD),
-      { field: GROUND_FIELD, kind: values.ground.kind, source: values.ground.source.trim(), note: '' },
-    ],
+    provenance: provenanceFrom(values, { limits, food }, before),
     ...reader.typed(),
   };
 }
 
-function foodDescriptionFrom(values: FoodFormValues, reader: FieldReader, before: FoodSpec['food']): FoodSpec['food'] {
+function limitsFrom(
+  values: FoodFormValues,
+  reader: FieldReader,
+  before: FoodSpec['limits'],
+): FoodSpec['limits'] {
+  return present({
+    oxygen_uptake_mg_per_kg: reader.read(
+      'limits.oxygen_uptake_mg_per_kg',
+      values.limits.oxygen_uptake_mg_per_kg,
+      {
+        kind: 'oxygen_uptake_mg_per_kg',
+        before: before.oxygen_uptake_mg_per_kg,
+      },
+    ),
+    headspace_oxygen_percent: reader.read(
+      'limits.headspace_oxygen_percent',
+      values.limits.headspace_oxygen_percent,
+      {
+        kind: 'percent',
+        before: before.headspace_oxygen_percent,
+      },
+    ),
+    // Without an isotherm the food's moisture is not followed, so there is no moisture to limit.
+    moisture_max_g_per_g:
+      values.moisture_model === 'held'
+        ? undefined
+        : reader.read('limits.moisture_max_g_per_g', values.limits.moisture_max_g_per_g, {
+            kind: 'moisture_g_per_g',
+            before: before.moisture_max_g_per_g,
+          }),
+    moisture_min_g_per_g:
+      values.moisture_model === 'held'
+        ? undefined
+        : reader.read('limits.moisture_min_g_per_g', values.limits.moisture_min_g_per_g, {
+            kind: 'moisture_g_per_g',
+            before: before.moisture_min_g_per_g,
+          }),
+  });
+}
+
+/** Entries stay with the numbers they speak of: a changed limit or isotherm is no longer its source's. */
+function provenanceFrom(
+  values: FoodFormValues,
+  now: Pick<FoodSpec, 'limits' | 'food'>,
+  before: FoodSpec,
+): ProvenanceEntry[] {
+  const source = values.ground.source.trim();
+  const ground = groundOf(before);
+  const isSameGround = ground?.kind === values.ground.kind && ground.source === source;
+  const hasSameLimits = JSON.stringify(sorted(now.limits)) === JSON.stringify(sorted(before.limits));
+  const hasSameIsotherm =
+    JSON.stringify(sorted(now.food.isotherm)) === JSON.stringify(sorted(before.food.isotherm));
+  const kept = before.provenance.filter(
+    (entry) =>
+      (hasSameLimits || !LIMIT_ENTRY.test(entry.field)) &&
+      (hasSameIsotherm || !/isotherm/i.test(entry.field)),
+  );
+  if (hasSameLimits && isSameGround) return kept;
+  const own: ProvenanceEntry = { field: GROUND_FIELD, kind: values.ground.kind, source, note: '' };
+  return [...kept.filter((entry) => entry.field !== GROUND_FIELD), own];
+}
+
+/** Keys in one order, so that two specs compare by what they hold. */
+function sorted(record: object | undefined): [string, unknown][] {
+  return Object.entries(record ?? {}).sort(([a], [b]) => a.localeCompare(b, 'en'));
+}
+
+function foodDescriptionFrom(
+  values: FoodFormValues,
+  reader: FieldReader,
+  before: FoodSpec['food'],
+): FoodSpec['food'] {
   const { food } = values;
   const isRate = food.oxygen_mode === 'rate';
   const isFollowed = values.moisture_model !== 'held';

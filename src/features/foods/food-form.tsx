@@ -11,7 +11,13 @@ import { Form, FormChoice, FormField, FormNumberField, FormSelect, Notice, Sheet
 import { FieldGrid } from '../../ui/field-grid';
 import { FormSaving } from '../../ui/form/form-saving';
 import { IsothermDrawing } from './components/isotherm-drawing';
-import { foodFormValues, foodSpecFrom, NEW_FOOD, validateFoodForm, type FoodFormValues } from './food-form-values';
+import {
+  foodFormValues,
+  foodSpecFrom,
+  NEW_FOOD,
+  validateFoodForm,
+  type FoodFormValues,
+} from './food-form-values';
 
 export interface FoodFormProps {
   /** Null for a new food. */
@@ -96,7 +102,8 @@ const OXYGEN_MODE_OPTIONS = [
 ];
 
 const OXYGEN_MODE_HINTS = {
-  at_once: 'The cautious choice for sensitive foods: the wall decides, and what is in the headspace counts at day 0.',
+  at_once:
+    'The cautious choice for sensitive foods: the wall decides, and what is in the headspace counts at day 0.',
   rate: 'The headspace keeps some oxygen; how fast it goes is the rate constant below.',
   none: 'Oxygen gathers in the headspace.',
 } as const;
@@ -107,7 +114,12 @@ function OxygenSheet() {
   const mode = values.food.oxygen_mode;
   return (
     <Sheet title="Oxygen">
-      <FormSelect name="food.oxygen_mode" label="How it takes oxygen" options={OXYGEN_MODE_OPTIONS} hint={OXYGEN_MODE_HINTS[mode]} />
+      <FormSelect
+        name="food.oxygen_mode"
+        label="How it takes oxygen"
+        options={OXYGEN_MODE_OPTIONS}
+        hint={OXYGEN_MODE_HINTS[mode]}
+      />
       {mode === 'rate' ? (
         <FieldGrid leastWidthPx={160}>
           <FormNumberField
@@ -172,7 +184,11 @@ function MoistureSheet({ toSpec }: { toSpec: (values: FoodFormValues) => FoodSpe
       ) : (
         <>
           <IsothermDrawing isotherm={isotherm} />
-          <FormNumberField name="food.initial_moisture_g_per_g" label="Moisture as packed" unit="g/100 g dry" />
+          <FormNumberField
+            name="food.initial_moisture_g_per_g"
+            label="Moisture as packed"
+            unit="g/100 g dry"
+          />
         </>
       )}
     </Sheet>
@@ -186,7 +202,10 @@ function LimitsSheet() {
   const limitsFault: unknown = errors.limits;
   const isShown = submitCount > 0 || touched.limits !== undefined;
   return (
-    <Sheet title="Limits" subtitle="The life ends at the first that is reached. Leave blank what does not end it.">
+    <Sheet
+      title="Limits"
+      subtitle="The life ends at the first that is reached. Leave blank what does not end it."
+    >
       <FieldGrid leastWidthPx={160}>
         <FormNumberField
           name="limits.oxygen_uptake_mg_per_kg"
@@ -226,8 +245,8 @@ function LimitsSheet() {
       <FormField name="ground.source" label="Source" options={{ isOptional: true }} />
       {OWN_DECISION_KINDS.has(values.ground.kind) ? (
         <Notice kind="caution">
-          These limits were not measured on your product: remembered, worked back from market life, or usage. The limit
-          is your own decision; take them as a place to start.
+          These limits were not measured on your product: remembered, worked back from market life, or usage.
+          The limit is your own decision; take them as a place to start.
         </Notice>
       ) : (
         <Small>A storage test of the real product is what proves a limit.</Small>

@@ -51,11 +51,15 @@ export function FoodsScreen() {
 function foodInWords({ food, limits }: FoodSpec, unitSystem: DisplayUnitSystem): string {
   const parts = [formatQuantity(food.mass_kg, 'mass_kg', { unitSystem, isExact: true }).text];
   if (limits.oxygen_uptake_mg_per_kg !== undefined) {
-    parts.push(`oxygen ${formatQuantity(limits.oxygen_uptake_mg_per_kg, 'oxygen_uptake_mg_per_kg', { unitSystem, isExact: true }).text}`);
+    parts.push(
+      `oxygen ${formatQuantity(limits.oxygen_uptake_mg_per_kg, 'oxygen_uptake_mg_per_kg', { unitSystem, isExact: true }).text}`,
+    );
   }
-  if (limits.headspace_oxygen_percent !== undefined) parts.push(`headspace oxygen ${limits.headspace_oxygen_percent} %`);
+  if (limits.headspace_oxygen_percent !== undefined)
+    parts.push(`headspace oxygen ${limits.headspace_oxygen_percent} %`);
   const { moisture_max_g_per_g: most, moisture_min_g_per_g: least } = limits;
-  const moisture = (value: number) => formatQuantity(value, 'moisture_g_per_g', { unitSystem, isExact: true }).text;
+  const moisture = (value: number) =>
+    formatQuantity(value, 'moisture_g_per_g', { unitSystem, isExact: true }).text;
   if (most !== undefined) parts.push(`moisture up to ${moisture(most)}`);
   if (least !== undefined) parts.push(`moisture down to ${moisture(least)}`);
   return parts.join(', ');

@@ -1,5 +1,10 @@
 import type { ProvenanceEntry, StatedValue } from '../../../shared/contract/materials';
-import { gasFromStated, InputError, type CoatingGasDescription, type FilmGasDescription } from '../../../shared/engine';
+import {
+  gasFromStated,
+  InputError,
+  type CoatingGasDescription,
+  type FilmGasDescription,
+} from '../../../shared/engine';
 import { parseNumber, type DisplayUnitSystem } from '../../../shared/units/format';
 import { FieldReader, fieldText } from '../../api/kept-forms/typed-quantity';
 import { factorAt, factorsFromValues, valuesFromFactors, type CurvePoint } from './humidity-curve-values';
@@ -84,7 +89,11 @@ export function gasFormValues(
       relative_humidity_high: percent(stated.relative_humidity_high) || empty.stated.relative_humidity_high,
       relative_humidity_low: percent(stated.relative_humidity_low) || empty.stated.relative_humidity_low,
       oxygen_mole_fraction_dry: percent(stated.oxygen_mole_fraction_dry) || '100',
-      activation_energy_J_per_mol: fieldText(stated.activation_energy_J_per_mol, 'energy_J_per_mol', unitSystem),
+      activation_energy_J_per_mol: fieldText(
+        stated.activation_energy_J_per_mol,
+        'energy_J_per_mol',
+        unitSystem,
+      ),
       measured_temperature_min_C: celsius(stated.measured_temperature_min_C),
       measured_temperature_max_C: celsius(stated.measured_temperature_max_C),
     },
@@ -130,8 +139,12 @@ export function statedFrom(values: GasFormValues, { gas, unitSystem, before }: G
     unit: stated.unit,
     temperature_C: read('temperature_C', 'temperature_C') ?? NaN,
     relative_humidity: read('relative_humidity', 'fraction_as_percent'),
-    relative_humidity_high: isWaterRate ? (read('relative_humidity_high', 'fraction_as_percent') ?? NaN) : undefined,
-    relative_humidity_low: isWaterRate ? (read('relative_humidity_low', 'fraction_as_percent') ?? NaN) : undefined,
+    relative_humidity_high: isWaterRate
+      ? (read('relative_humidity_high', 'fraction_as_percent') ?? NaN)
+      : undefined,
+    relative_humidity_low: isWaterRate
+      ? (read('relative_humidity_low', 'fraction_as_percent') ?? NaN)
+      : undefined,
     oxygen_mole_fraction_dry: isOxygenRate
       ? (read('oxygen_mole_fraction_dry', 'fraction_as_percent') ?? NaN)
       : undefined,
@@ -169,7 +182,11 @@ function pointsFrom(
 }
 
 /** The same curve said the other way, so that changing the mode changes no physics. Null where it is not yet whole. */
-export function curveInMode(values: GasFormValues, mode: CurveMode, unitSystem: DisplayUnitSystem): CurveRow[] | null {
+export function curveInMode(
+  values: GasFormValues,
+  mode: CurveMode,
+  unitSystem: DisplayUnitSystem,
+): CurveRow[] | null {
   if (mode === values.curve_mode || mode === 'none' || values.curve_mode === 'none') return null;
   const value = parseNumber(values.stated.value);
   const points = pointsFrom(values, { value, unitSystem });
@@ -183,7 +200,10 @@ export function curveInMode(values: GasFormValues, mode: CurveMode, unitSystem: 
 }
 
 function statedHumidity(values: GasFormValues, unitSystem: DisplayUnitSystem): number {
-  return new FieldReader(unitSystem).read('', values.stated.relative_humidity, { kind: 'fraction_as_percent' }) ?? 0;
+  return (
+    new FieldReader(unitSystem).read('', values.stated.relative_humidity, { kind: 'fraction_as_percent' }) ??
+    0
+  );
 }
 
 /**

@@ -17,7 +17,8 @@ export function factorAt(points: CurvePoint[], relativeHumidity: number): number
   const upperIndex = points.findIndex((point) => point.relative_humidity >= relativeHumidity);
   const lower = points[upperIndex - 1] ?? first;
   const upper = points[upperIndex] ?? last;
-  const share = (relativeHumidity - lower.relative_humidity) / (upper.relative_humidity - lower.relative_humidity);
+  const share =
+    (relativeHumidity - lower.relative_humidity) / (upper.relative_humidity - lower.relative_humidity);
   return Math.exp((1 - share) * Math.log(lower.factor) + share * Math.log(upper.factor));
 }
 

@@ -1,7 +1,13 @@
 import { describe, expect, it } from 'vitest';
 import type { FilmMaterialSpec } from '../../../shared/contract/materials';
 import { curveInMode, type GasFormValues } from './gas-form-values';
-import { gaugesFrom, materialFormValues, materialSpecFrom, validateMaterialForm, type MaterialFormValues } from './material-form-values';
+import {
+  gaugesFrom,
+  materialFormValues,
+  materialSpecFrom,
+  validateMaterialForm,
+  type MaterialFormValues,
+} from './material-form-values';
 
 const context = { unitSystem: 'metric' as const, before: null };
 
@@ -28,7 +34,10 @@ describe('the material form', () => {
   it('takes values at humidities as factors of the stated one', () => {
     expect(validateMaterialForm(context)(evoh())).toEqual({});
     const spec = materialSpecFrom(evoh(), context) as FilmMaterialSpec;
-    expect(spec.oxygen.stated.humidity_curve).toEqual({ relative_humidity: [0.6, 0.8, 0.9], factor: [1, 9, 100] });
+    expect(spec.oxygen.stated.humidity_curve).toEqual({
+      relative_humidity: [0.6, 0.8, 0.9],
+      factor: [1, 9, 100],
+    });
     expect(spec.oxygen.gas.reference_relative_humidity).toBe(0.6);
     // 1 cm³(STP)·µm/(m²·day·atm) is 5.09625e-21 mol·m/(m²·s·Pa).
     expect(spec.oxygen.gas.permeability_mol_m_per_m2_s_Pa / 10).toBeCloseTo(5.09625e-21, 25);
@@ -48,14 +57,20 @@ describe('the material form', () => {
       values.oxygen.curve_mode = 'factors';
     });
     const errors = validateMaterialForm(context)(wrong);
-    expect(errors.oxygen?.stated).toMatchObject({ value: expect.stringContaining('“ten” is no number') as string });
+    expect(errors.oxygen?.stated).toMatchObject({
+      value: expect.stringContaining('“ten” is no number') as string,
+    });
     expect(errors.oxygen?.curve_mode).toContain('rising humidity');
-    expect(errors.water?.stated).toMatchObject({ relative_humidity_low: expect.stringContaining('drier') as string });
+    expect(errors.water?.stated).toMatchObject({
+      relative_humidity_low: expect.stringContaining('drier') as string,
+    });
   });
 
   it('refuses a material without a value', () => {
     const errors = validateMaterialForm(context)(evoh((values) => (values.oxygen.stated.value = '')));
-    expect(errors.oxygen?.stated).toMatchObject({ value: expect.stringContaining('enter a number') as string });
+    expect(errors.oxygen?.stated).toMatchObject({
+      value: expect.stringContaining('enter a number') as string,
+    });
   });
 
   it('reads gauges with a decimal comma as well', () => {

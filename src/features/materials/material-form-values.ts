@@ -5,6 +5,7 @@ import {
   type MaterialKind,
   type MaterialSpec,
   type ProvenanceEntry,
+  type StatedValue,
 } from '../../../shared/contract/materials';
 import { parseNumber, type DisplayKindName, type DisplayUnitSystem } from '../../../shared/units/format';
 import { FieldReader, fieldText } from '../../api/kept-forms/typed-quantity';
@@ -72,17 +73,18 @@ export interface MaterialReading {
 export function readMaterial(values: MaterialFormValues, context: MaterialFormContext): MaterialReading {
   const { unitSystem, before } = context;
   const reader = new FieldReader(unitSystem);
-  const number = (name: string, text: string, old?: number | null) => reader.read(name, text, { kind: 'number', before: old });
+  const number = (name: string, text: string, old?: number | null) =>
+    reader.read(name, text, { kind: 'number', before: old });
   const common = {
     name: values.name.trim(),
     material_class: values.material_class,
     polymer_family: values.polymer_family.trim(),
     typical_gauges_um: gaugesFrom(values.typical_gauges_um),
-    density_kg_per_m3: number('density_kg_per_m3', values.density_kg_per_m3, before?.density_kg_per_m3) ?? null,
+    density_kg_per_m3:
+      number('density_kg_per_m3', values.density_kg_per_m3, before?.density_kg_per_m3) ?? null,
     price_per_kg: number('price_per_kg', values.price_per_kg, before?.price_per_kg) ?? null,
     price_per_m2: number('price_per_m2', values.price_per_m2, before?.price_per_m2) ?? null,
     notes: values.notes,
-    provenance: provenanceFrom(values, before),
   };
   const defects = values.has_defects
     ? {
@@ -90,34 +92,37 @@ export function readMaterial(values: MaterialFormValues, context: MaterialFormCo
         diameter_um: number('defects.diameter_um', values.defects.diameter_um) ?? NaN,
       }
     : null;
-  if (values.kind === 'foil') return { spec: { ...common, kind: 'foil', defects }, faults: {} };
+  if (values.kind === 'foil') {
+    const provenance = provenanceFrom(values, {}, before);
+    return { spec: { ...common, provenance, kind: 'foil', defects }, faults: {} };
+  }
 
   const kind = values.kind;
   const faults: Record<string, string> = {};
-  const gases = Object.fromEntries(
-    GASES.map((gas) => {
-      const keptBefore = before !== null && before.kind !== 'foil' ? before[gas] : undefined;
-      const stated = statedFrom(values[gas], { gas, kind, unitSystem, before: keptBefore?.stated });
-      const computed = computedGas(stated, { gas, kind });
-      if ('fault' in computed) faults[`${gas}.stated.${computed.fault.field}`] = computed.fault.message;
-      const spread = number(`${gas}.geometric_sd`, values[gas].geometric_sd, keptBefore?.geometric_sd);
-      return [
-        gas,
-        {
-          stated,
-          gas: 'block' in computed ? computed.block : undefined,
-          ...(spread === undefined ? {} : { geometric_sd: spread }),
-        },
-      ];
-    }),
-  );
-  const spec = kind === 'film' ? { ...common, kind, ...gases } : { ...common, kind, ...gases, defects };
+  const readGas = (gas: Gas) => {
+    const keptBefore = before !== null && before.kind !== 'foil' ? before[gas] : undefined;
+    const stated = statedFrom(values[gas], { gas, kind, unitSystem, before: keptBefore?.stated });
+    const computed = computedGas(stated, { gas, kind });
+    if ('fault' in computed) faults[`${gas}.stated.${computed.fault.field}`] = computed.fault.message;
+    const spread = number(`${gas}.geometric_sd`, values[gas].geometric_sd, keptBefore?.geometric_sd);
+    return {
+      stated,
+      gas: 'block' in computed ? computed.block : undefined,
+      ...(spread === undefined ? {} : { geometric_sd: spread }),
+    };
+  };
+  const gases = { oxygen: readGas('oxygen'), water: readGas('water') };
+  const provenance = provenanceFrom(values, gases, before);
+  const shared = { ...common, provenance, ...gases };
+  const spec = kind === 'film' ? { ...shared, kind } : { ...shared, kind, defects };
   return { spec, faults };
 }
 
 /** A reading that the schema has passed. */
 export function materialSpecFrom(values: MaterialFormValues, context: MaterialFormContext): MaterialSpec {
-  return materialSpecSchema.validateSync(readMaterial(values, context).spec, { strict: true }) as MaterialSpec;
+  return materialSpecSchema.validateSync(readMaterial(values, context).spec, {
+    strict: true,
+  }) as MaterialSpec;
 }
 
 /** '10; 12; 15' or '10 12 15': a comma may be a decimal comma, so it separates only before a space. */
@@ -129,17 +134,48 @@ export function gaugesFrom(text: string): number[] {
     .map(parseNumber);
 }
 
-/** The form's own words on where each gas's value comes from; the rest stays where its value stayed. */
-function provenanceFrom(values: MaterialFormValues, before: MaterialSpec | null): ProvenanceEntry[] {
-  const gases = values.kind === 'foil' ? [] : GASES;
-  const own = gases.map((gas): ProvenanceEntry => {
+/** Which entries of a gas speak of which part of what is stated. */
+const ENTRY_OF_PART: { part: keyof StatedValue; entry: RegExp }[] = [
+  { part: 'activation_energy_J_per_mol', entry: /activation/i },
+  { part: 'humidity_curve', entry: /humidity_?curve/i },
+  { part: 'measured_temperature_min_C', entry: /measured/i },
+  { part: 'measured_temperature_max_C', entry: /measured/i },
+  { part: 'temperature_C', entry: /conditions/i },
+  { part: 'relative_humidity', entry: /conditions/i },
+  { part: 'relative_humidity_high', entry: /conditions/i },
+  { part: 'relative_humidity_low', entry: /conditions/i },
+];
+
+interface StatedGases {
+  oxygen?: { stated: StatedValue };
+  water?: { stated: StatedValue };
+}
+
+/** The form's own words on each value; entries of other numbers stay as long as their number stays. */
+function provenanceFrom(
+  values: MaterialFormValues,
+  now: StatedGases,
+  before: MaterialSpec | null,
+): ProvenanceEntry[] {
+  const own = GASES.flatMap((gas): ProvenanceEntry[] => {
+    if (now[gas] === undefined) return [];
     const { kind, source } = values[gas].ground;
     const kept = before?.provenance.find((entry) => entry.field === `${gas}.value`);
     const isSame = kept?.kind === kind && kept.source === source.trim();
-    return { field: `${gas}.value`, kind, source: source.trim(), note: isSame ? kept.note : '' };
+    return [{ field: `${gas}.value`, kind, source: source.trim(), note: isSame ? kept.note : '' }];
   });
-  const ownFields = new Set(own.map((entry) => entry.field));
-  return [...own, ...(before?.provenance ?? []).filter((entry) => !ownFields.has(entry.field))];
+  const others = (before?.provenance ?? []).filter((entry) => {
+    const gas = GASES.find((name) => entry.field.startsWith(`${name}.`));
+    if (gas === undefined) return true;
+    if (entry.field === `${gas}.value` || before === null || before.kind === 'foil') return false;
+    const stated = now[gas]?.stated;
+    if (stated === undefined) return false;
+    return ENTRY_OF_PART.every(
+      ({ part, entry: words }) =>
+        !words.test(entry.field) || JSON.stringify(stated[part]) === JSON.stringify(before[gas].stated[part]),
+    );
+  });
+  return [...own, ...others];
 }
 
 export function validateMaterialForm(context: MaterialFormContext) {
@@ -165,14 +201,19 @@ export function validateMaterialForm(context: MaterialFormContext) {
 function curveWords(message: string, field: string, values: MaterialFormValues): string {
   const gas = GASES.find((name) => field.startsWith(`${name}.curve[`));
   if (gas === undefined || values[gas].curve_mode === 'factors') return message;
-  return /^Factor:/.test(message) ? 'Value at this humidity: enter a number above 0, in the unit of the value above.' : message;
+  return /^Factor:/.test(message)
+    ? 'Value at this humidity: enter a number above 0, in the unit of the value above.'
+    : message;
 }
 
 /** Where a path of the spec stands in the form. */
 export function materialFieldName(path: string): string {
   return path
     .replace(/^spec\./, '')
-    .replace(/^(oxygen|water)\.stated\.humidity_curve\.relative_humidity\[(\d+)\]/, '$1.curve[$2].relative_humidity')
+    .replace(
+      /^(oxygen|water)\.stated\.humidity_curve\.relative_humidity\[(\d+)\]/,
+      '$1.curve[$2].relative_humidity',
+    )
     .replace(/^(oxygen|water)\.stated\.humidity_curve\.factor\[(\d+)\]/, '$1.curve[$2].amount')
     .replace(/^(oxygen|water)\.stated\.humidity_curve.*/, '$1.curve_mode')
     .replace(/^typical_gauges_um.*/, 'typical_gauges_um');
@@ -181,7 +222,8 @@ export function materialFieldName(path: string): string {
 function textAt(values: MaterialFormValues, field: string): unknown {
   const steps = field.split(/[.[\]]+/).filter((step) => step !== '');
   return steps.reduce<unknown>(
-    (value, step) => (typeof value === 'object' && value !== null ? (value as Record<string, unknown>)[step] : undefined),
+    (value, step) =>
+      typeof value === 'object' && value !== null ? (value as Record<string, unknown>)[step] : undefined,
     values,
   );
 }
@@ -191,6 +233,7 @@ function kindOfMaterialField(path: string): DisplayKindName | null {
   if (/relative_humidity/.test(path)) return 'fraction_as_percent';
   if (path.endsWith('oxygen_mole_fraction_dry')) return 'fraction_as_percent';
   if (path.endsWith('activation_energy_J_per_mol')) return 'energy_J_per_mol';
-  if (/\.(value|geometric_sd|density_per_m2|diameter_um)$/.test(path) || /^(density|price)_/.test(path)) return 'number';
+  if (/\.(value|geometric_sd|density_per_m2|diameter_um)$/.test(path) || /^(density|price)_/.test(path))
+    return 'number';
   return null;
 }

@@ -56,7 +56,12 @@ export function MaterialForm({ opened, returnTo, onTheirsTaken }: MaterialFormPr
         />
         <KindChoice />
         <FieldGrid>
-          <FormField name="polymer_family" label="Polymer" hint="As in PET, PE, PP." options={{ isOptional: true }} />
+          <FormField
+            name="polymer_family"
+            label="Polymer"
+            hint="As in PET, PE, PP."
+            options={{ isOptional: true }}
+          />
           <FormField
             name="typical_gauges_um"
             label="Usual gauges, µm"
@@ -69,8 +74,18 @@ export function MaterialForm({ opened, returnTo, onTheirsTaken }: MaterialFormPr
       <DefectFields />
       <Sheet title="Besides">
         <FieldGrid>
-          <FormNumberField name="density_kg_per_m3" label="Density" unit="kg/m³" options={{ isOptional: true }} />
-          <FormNumberField name="price_per_kg" label="Price" unit={`${account.currency}/kg`} options={{ isOptional: true }} />
+          <FormNumberField
+            name="density_kg_per_m3"
+            label="Density"
+            unit="kg/m³"
+            options={{ isOptional: true }}
+          />
+          <FormNumberField
+            name="price_per_kg"
+            label="Price"
+            unit={`${account.currency}/kg`}
+            options={{ isOptional: true }}
+          />
           <FormNumberField
             name="price_per_m2"
             label="Price, coatings"
@@ -92,7 +107,8 @@ export function MaterialForm({ opened, returnTo, onTheirsTaken }: MaterialFormPr
                 what: 'This material',
                 asNewLabel: 'Save mine as a new material',
                 isBusy: keeping.isSaving,
-                differences: (mine) => specDifferences(readMaterial(mine, context).spec, conflict.revision.spec),
+                differences: (mine) =>
+                  specDifferences(readMaterial(mine, context).spec, conflict.revision.spec),
                 onKeepMine: (mine) => keeping.keepMine(toSpec(mine)),
                 onSaveAsNew: (mine) => keeping.saveAsNew(toSpec(mine)),
                 onTakeTheirs: () => {
@@ -108,7 +124,11 @@ export function MaterialForm({ opened, returnTo, onTheirsTaken }: MaterialFormPr
 
 const KINDS: { value: MaterialKind; label: string; hint: string }[] = [
   { value: 'film', label: 'Film', hint: 'Twice the gauge lets half as much through.' },
-  { value: 'coating', label: 'Coating', hint: 'Metallised, oxide or lacquer on a film: one value for the whole of it.' },
+  {
+    value: 'coating',
+    label: 'Coating',
+    hint: 'Metallised, oxide or lacquer on a film: one value for the whole of it.',
+  },
   { value: 'foil', label: 'Foil', hint: 'Nothing passes the metal, only its pinholes.' },
 ];
 

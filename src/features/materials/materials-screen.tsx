@@ -43,7 +43,10 @@ export function MaterialsScreen() {
               label="Class"
               value={materialClass}
               onChange={setMaterialClass}
-              options={[{ value: '', label: 'All classes' }, ...MATERIAL_CLASSES.map((each) => ({ value: each, label: each }))]}
+              options={[
+                { value: '', label: 'All classes' },
+                ...MATERIAL_CLASSES.map((each) => ({ value: each, label: each })),
+              ]}
             />
             <MaterialRows
               materials={found.filter(
@@ -60,7 +63,9 @@ export function MaterialsScreen() {
 function MaterialRows({ materials }: { materials: KeptMaterial[] }) {
   const account = useAccount();
   const unitSystem = useUnitSystem();
-  const sorted = [...materials].sort((a, b) => a.revision.spec.name.localeCompare(b.revision.spec.name, 'en'));
+  const sorted = [...materials].sort((a, b) =>
+    a.revision.spec.name.localeCompare(b.revision.spec.name, 'en'),
+  );
   if (sorted.length === 0) return <Small>No material of that class matches.</Small>;
   return (
     <Stack gap="x1" role="list" label="Materials">

@@ -3,16 +3,7 @@ import type { DisplayKindName, DisplayUnitSystem } from '../../../shared/units/f
 import { FieldReader, fieldText } from '../../api/kept-forms/typed-quantity';
 import { validateKeptForm } from '../../api/kept-forms/validate-kept-form';
 
-const POUCH_LENGTHS = [
-  'width_mm',
-  'height_mm',
-  'seal_left_mm',
-  'seal_right_mm',
-  'seal_top_mm',
-  'seal_bottom_mm',
-  'gusset_depth_mm',
-] as const;
-type PouchLength = (typeof POUCH_LENGTHS)[number];
+type PouchLength = Exclude<keyof PouchForm, 'type'>;
 
 /** Every number as the text that stands in its field. */
 export interface PackFormValues {
@@ -63,7 +54,11 @@ export function packFormValues(spec: PackSpec, unitSystem: DisplayUnitSystem): P
       area_m2: spec.form.type === 'area' ? fieldText(spec.form.area_m2, 'area_m2', unitSystem) : '',
     },
     headspace_cm3: fieldText(spec.headspace_cm3, 'volume_cm3', unitSystem),
-    starting_headspace_oxygen_percent: fieldText(spec.starting_headspace_oxygen_percent, 'percent', unitSystem),
+    starting_headspace_oxygen_percent: fieldText(
+      spec.starting_headspace_oxygen_percent,
+      'percent',
+      unitSystem,
+    ),
     has_seal_path: spec.has_seal_path,
     has_leaks: spec.leaks !== null,
     leaks: {
@@ -97,7 +92,10 @@ export function packSpecFrom(values: PackFormValues, { unitSystem, before }: Pac
     has_seal_path: values.form.type === 'pouch' && values.has_seal_path,
     leaks: values.has_leaks
       ? {
-          count: reader.readRequired('leaks.count', values.leaks.count, { kind: 'number', before: before.leaks?.count }),
+          count: reader.readRequired('leaks.count', values.leaks.count, {
+            kind: 'number',
+            before: before.leaks?.count,
+          }),
           length_mm: reader.readRequired('leaks.length_mm', values.leaks.length_mm, {
             kind: 'length_mm',
             before: before.leaks?.length_mm,
@@ -136,7 +134,10 @@ function areaFrom(values: PackFormValues, reader: FieldReader, before: PackSpec)
   const areaBefore = before.form.type === 'area' ? before.form.area_m2 : undefined;
   return {
     type: 'area',
-    area_m2: reader.readRequired('form.area_m2', values.form.area_m2, { kind: 'area_m2', before: areaBefore }),
+    area_m2: reader.readRequired('form.area_m2', values.form.area_m2, {
+      kind: 'area_m2',
+      before: areaBefore,
+    }),
   };
 }
 

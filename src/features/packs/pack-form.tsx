@@ -8,7 +8,13 @@ import { Form, FormCheckbox, FormChoice, FormField, FormNumberField, Sheet } fro
 import { FieldGrid } from '../../ui/field-grid';
 import { FormSaving } from '../../ui/form/form-saving';
 import { PackMeasures } from './components/pack-measures';
-import { NEW_PACK, packFormValues, packSpecFrom, validatePackForm, type PackFormValues } from './pack-form-values';
+import {
+  NEW_PACK,
+  packFormValues,
+  packSpecFrom,
+  validatePackForm,
+  type PackFormValues,
+} from './pack-form-values';
 
 export interface PackFormProps {
   /** Null for a new pack. */
@@ -103,7 +109,7 @@ function PouchFields() {
   return (
     <FieldGrid>
       {POUCH_FIELDS.map(({ name, label }) => (
-          <FormNumberField key={name} name={name} label={label} unit={fieldUnit('length_mm', unitSystem)} />
+        <FormNumberField key={name} name={name} label={label} unit={fieldUnit('length_mm', unitSystem)} />
       ))}
     </FieldGrid>
   );
@@ -119,13 +125,13 @@ function HeadspaceFields() {
   return (
     <Sheet title="Inside" subtitle="The gas over the food when the pack is closed.">
       <FieldGrid>
-          <FormNumberField name="headspace_cm3" label="Headspace" unit={fieldUnit('volume_cm3', unitSystem)} />
-          <FormNumberField
-            name="starting_headspace_oxygen_percent"
-            label="Oxygen in it at the start"
-            unit="%"
-            hint="20.9 for air, 0.5 to 2 after flushing with nitrogen."
-          />
+        <FormNumberField name="headspace_cm3" label="Headspace" unit={fieldUnit('volume_cm3', unitSystem)} />
+        <FormNumberField
+          name="starting_headspace_oxygen_percent"
+          label="Oxygen in it at the start"
+          unit="%"
+          hint="20.9 for air, 0.5 to 2 after flushing with nitrogen."
+        />
       </FieldGrid>
     </Sheet>
   );
@@ -142,12 +148,16 @@ function LeakFields({ hasLeaks, isPouch }: { hasLeaks: boolean; isPouch: boolean
           hint="Edgewise through both sealant layers, over the width of the seal."
         />
       ) : null}
-      <FormCheckbox name="has_leaks" label="Leak channels" hint="Folds or grains in the seal that never quite close." />
+      <FormCheckbox
+        name="has_leaks"
+        label="Leak channels"
+        hint="Folds or grains in the seal that never quite close."
+      />
       {hasLeaks ? (
         <FieldGrid>
-            <FormNumberField name="leaks.count" label="How many" />
-            <FormNumberField name="leaks.length_mm" label="Length" unit={fieldUnit('length_mm', unitSystem)} />
-            <FormNumberField name="leaks.diameter_um" label="Diameter" unit="µm" />
+          <FormNumberField name="leaks.count" label="How many" />
+          <FormNumberField name="leaks.length_mm" label="Length" unit={fieldUnit('length_mm', unitSystem)} />
+          <FormNumberField name="leaks.diameter_um" label="Diameter" unit="µm" />
         </FieldGrid>
       ) : null}
     </Sheet>

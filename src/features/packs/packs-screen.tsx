@@ -34,7 +34,10 @@ export function PacksScreen() {
             {items.map((pack, index) => {
               const { spec } = pack.revision;
               const area = formatQuantity(areaOfForm(spec.form), 'area_m2', { unitSystem }).text;
-              const headspace = formatQuantity(spec.headspace_cm3, 'volume_cm3', { unitSystem, isExact: true }).text;
+              const headspace = formatQuantity(spec.headspace_cm3, 'volume_cm3', {
+                unitSystem,
+                isExact: true,
+              }).text;
               return (
                 <View key={pack.id} role="listitem">
                   <Row

@@ -37,7 +37,7 @@ export const NEW_ROUTE: RouteSpec = {
 };
 
 export function routeFormValues(spec: RouteSpec, unitSystem: DisplayUnitSystem): RouteFormValues {
-  const ground = spec.provenance.find((entry) => entry.field === GROUND_FIELD);
+  const ground = groundOf(spec);
   return {
     name: spec.name,
     route: {
@@ -57,6 +57,11 @@ export function routeFormValues(spec: RouteSpec, unitSystem: DisplayUnitSystem):
   };
 }
 
+/** The form's own entry, or what the library says of its temperatures. */
+function groundOf(spec: RouteSpec): ProvenanceEntry | undefined {
+  return spec.provenance.find((entry) => entry.field === GROUND_FIELD) ?? spec.provenance[0];
+}
+
 export interface RouteFormContext {
   unitSystem: DisplayUnitSystem;
   before: RouteSpec;
@@ -68,7 +73,9 @@ export function routeSpecFrom(values: RouteFormValues, { unitSystem, before }: R
     const path = `route.legs[${index}]`;
     return {
       ...(leg.name.trim() === '' ? {} : { name: leg.name.trim() }),
-      temperature_C: reader.readRequired(`${path}.temperature_C`, leg.temperature_C, { kind: 'temperature_C' }),
+      temperature_C: reader.readRequired(`${path}.temperature_C`, leg.temperature_C, {
+        kind: 'temperature_C',
+      }),
       relative_humidity: reader.readRequired(`${path}.relative_humidity`, leg.relative_humidity, {
         kind: 'fraction_as_percent',
       }),
@@ -83,12 +90,24 @@ export function routeSpecFrom(values: RouteFormValues, { unitSystem, before }: R
       before: before.horizon_days,
     }),
     notes: values.notes,
-    provenance: [
-      ...before.provenance.filter((entry) => entry.field !== GROUND_FIELD),
-      { field: GROUND_FIELD, kind: values.ground.kind, source: values.ground.source.trim(), note: '' },
-    ],
+    provenance: provenanceFrom(values, legs, before),
     ...reader.typed(),
   };
+}
+
+/** Other conditions are no longer those of the library's source: then the form's own words stand alone. */
+function provenanceFrom(
+  values: RouteFormValues,
+  legs: RouteSpec['route']['legs'],
+  before: RouteSpec,
+): ProvenanceEntry[] {
+  const source = values.ground.source.trim();
+  const ground = groundOf(before);
+  const isSameRoute = JSON.stringify(legs) === JSON.stringify(before.route.legs);
+  if (isSameRoute && ground?.kind === values.ground.kind && ground.source === source)
+    return before.provenance;
+  const own: ProvenanceEntry = { field: GROUND_FIELD, kind: values.ground.kind, source, note: '' };
+  return isSameRoute ? [own, ...before.provenance.filter((entry) => entry.field !== GROUND_FIELD)] : [own];
 }
 
 export function validateRouteForm(context: RouteFormContext) {

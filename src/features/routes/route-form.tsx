@@ -3,15 +3,32 @@ import { View } from 'react-native';
 import type { KeptThing } from '../../../shared/contract/kept-things';
 import { PROVENANCE_KINDS } from '../../../shared/contract/materials';
 import type { RouteSpec } from '../../../shared/contract/routes';
-import { provenanceInWords } from '../../api/kept-forms/provenance-words';
+import { provenanceFieldInWords, provenanceInWords } from '../../api/kept-forms/provenance-words';
 import { specDifferences } from '../../api/kept-forms/spec-differences';
 import { specFieldName, useKeptThingForm } from '../../api/kept-forms/use-kept-thing-form';
 import { hasRole, useAccount, useUnitSystem } from '../../session';
-import { Button, Form, FormChoice, FormField, FormNumberField, FormSelect, Inline, Sheet, Small, SPACE } from '../../ui';
+import {
+  Button,
+  Form,
+  FormChoice,
+  FormField,
+  FormNumberField,
+  FormSelect,
+  Inline,
+  Sheet,
+  Small,
+  SPACE,
+} from '../../ui';
 import { FormSaving } from '../../ui/form/form-saving';
 import { LegFields } from './components/leg-fields';
 import { LegsRuler } from './components/legs-ruler';
-import { NEW_ROUTE, routeFormValues, routeSpecFrom, validateRouteForm, type RouteFormValues } from './route-form-values';
+import {
+  NEW_ROUTE,
+  routeFormValues,
+  routeSpecFrom,
+  validateRouteForm,
+  type RouteFormValues,
+} from './route-form-values';
 import { legsAfter, type LegEvent } from './route-legs';
 
 export interface RouteFormProps {
@@ -61,7 +78,7 @@ export function RouteForm({ opened, returnTo, onTheirsTaken }: RouteFormProps) {
           .filter((entry) => entry.field !== 'legs')
           .map((entry) => (
             <Small key={entry.field}>
-              {`${entry.field.replace(/_/g, ' ')}: ${provenanceInWords(entry.kind)}${entry.source === '' ? '' : `, ${entry.source}`}`}
+              {`${provenanceFieldInWords(entry.field)}: ${provenanceInWords(entry.kind)}${entry.source === '' ? '' : `, ${entry.source}`}`}
             </Small>
           ))}
       </Sheet>
@@ -98,11 +115,18 @@ function LegsSheet() {
   const { legs, after_last } = formik.values.route;
   const onEvent = (event: LegEvent) => {
     const next = legsAfter({ legs, nextKey: formik.values.nextKey }, event);
-    void formik.setValues({ ...formik.values, nextKey: next.nextKey, route: { legs: next.legs, after_last } });
+    void formik.setValues({
+      ...formik.values,
+      nextKey: next.nextKey,
+      route: { legs: next.legs, after_last },
+    });
   };
   const listFault = formik.errors.route?.legs;
   return (
-    <Sheet title="Legs" subtitle="In the order of travel: how warm and how moist the air outside the pack is, and how long.">
+    <Sheet
+      title="Legs"
+      subtitle="In the order of travel: how warm and how moist the air outside the pack is, and how long."
+    >
       <View role="list" aria-label="Legs" style={{ gap: SPACE.x3 }}>
         {legs.map((leg, index) => (
           <LegFields key={leg.key} legKey={leg.key} index={index} count={legs.length} onEvent={onEvent} />
@@ -127,7 +151,15 @@ function LegsSheet() {
 function RouteRuler({ toSpec }: { toSpec: (values: RouteFormValues) => RouteSpec }) {
   const { values } = useFormikContext<RouteFormValues>();
   const legs = toSpec(values).route.legs;
-  const isWhole = legs.every((leg) => leg.days > 0 && Number.isFinite(leg.temperature_C + leg.relative_humidity + leg.days));
-  if (legs.length === 0 || !isWhole) return <Small>The ruler comes as soon as every leg has its numbers.</Small>;
-  return <LegsRuler legs={legs.map((leg) => ({ ...leg, name: leg.name ?? '' }))} afterLast={values.route.after_last} />;
+  const isWhole = legs.every(
+    (leg) => leg.days > 0 && Number.isFinite(leg.temperature_C + leg.relative_humidity + leg.days),
+  );
+  if (legs.length === 0 || !isWhole)
+    return <Small>The ruler comes as soon as every leg has its numbers.</Small>;
+  return (
+    <LegsRuler
+      legs={legs.map((leg) => ({ ...leg, name: leg.name ?? '' }))}
+      afterLast={values.route.after_last}
+    />
+  );
 }

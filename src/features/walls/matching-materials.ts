@@ -2,7 +2,10 @@ import type { KeptMaterial } from '../../api/kept-things-queries';
 
 /** Every word of the search must occur in name, class or polymer family; sorted by name. */
 export function matchingMaterials(materials: KeptMaterial[], search: string): KeptMaterial[] {
-  const words = search.toLowerCase().split(/\s+/).filter((word) => word !== '');
+  const words = search
+    .toLowerCase()
+    .split(/\s+/)
+    .filter((word) => word !== '');
   return materials
     .filter(({ revision: { spec } }) => {
       const text = `${spec.name} ${spec.material_class} ${spec.polymer_family}`.toLowerCase();

@@ -50,10 +50,16 @@ export function useMaterialBook(layers: PinnedLayer[]): MaterialBook {
   };
 }
 
-export function materialsPinnedToOlder(layers: PinnedLayer[], materials: Pick<KeptMaterial, 'id' | 'revision'>[]): string[] {
+function materialsPinnedToOlder(
+  layers: PinnedLayer[],
+  materials: Pick<KeptMaterial, 'id' | 'revision'>[],
+): string[] {
   const newest = new Map(materials.map((material) => [material.id, material.revision.id]));
   const ids = layers
-    .filter((layer) => newest.has(layer.material_id) && newest.get(layer.material_id) !== layer.material_revision_id)
+    .filter(
+      (layer) =>
+        newest.has(layer.material_id) && newest.get(layer.material_id) !== layer.material_revision_id,
+    )
     .map((layer) => layer.material_id);
   return [...new Set(ids)];
 }

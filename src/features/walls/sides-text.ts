@@ -8,11 +8,17 @@ import type { SidesOfWall } from './wall-preview';
 /** The chosen conditions as they stand in their fields. */
 export type SidesText = Record<keyof SidesOfWall, string>;
 
-const FIELDS: Record<keyof SidesOfWall, { label: string; kind: DisplayKindName; min: number; max: number }> = {
-  temperature_C: { label: 'Temperature', kind: 'temperature_C', min: RULES.temperature.min, max: RULES.temperature.max },
-  relative_humidity_outside: { label: 'Humidity outside', kind: 'fraction_as_percent', min: 0, max: 1 },
-  relative_humidity_inside: { label: 'Humidity inside', kind: 'fraction_as_percent', min: 0, max: 1 },
-};
+const FIELDS: Record<keyof SidesOfWall, { label: string; kind: DisplayKindName; min: number; max: number }> =
+  {
+    temperature_C: {
+      label: 'Temperature',
+      kind: 'temperature_C',
+      min: RULES.temperature.min,
+      max: RULES.temperature.max,
+    },
+    relative_humidity_outside: { label: 'Humidity outside', kind: 'fraction_as_percent', min: 0, max: 1 },
+    relative_humidity_inside: { label: 'Humidity inside', kind: 'fraction_as_percent', min: 0, max: 1 },
+  };
 
 export const SIDES_FIELDS = Object.keys(FIELDS).filter((name): name is keyof SidesOfWall => name in FIELDS);
 
@@ -29,7 +35,11 @@ export function sidesAsText(sides: SidesOfWall, unitSystem: DisplayUnitSystem): 
 }
 
 /** undefined where all is well. */
-export function sidesFault(name: keyof SidesOfWall, text: string, unitSystem: DisplayUnitSystem): string | undefined {
+export function sidesFault(
+  name: keyof SidesOfWall,
+  text: string,
+  unitSystem: DisplayUnitSystem,
+): string | undefined {
   const { label, kind, min, max } = FIELDS[name];
   const value = fieldValue(text, kind, unitSystem);
   const isGood = quantity({ label, unit: '', min, max }).isValidSync(value);

@@ -36,6 +36,8 @@ describe('suggestedName', () => {
 
 describe('shortMaterialName', () => {
   it('drops the gauge that a foil carries in its name', () => {
-    expect(shortMaterialName({ name: 'Aluminium foil 7 µm', kind: 'foil', polymer_family: '' })).toBe('Aluminium foil');
+    expect(shortMaterialName({ name: 'Aluminium foil 7 µm', kind: 'foil', polymer_family: '' })).toBe(
+      'Aluminium foil',
+    );
   });
 });

@@ -43,7 +43,7 @@ export function turnedRoundInWords(comparison: TurnedRoundComparison, unitSystem
 }
 
 /** The mean of the humidities at a layer's two faces. */
-export function layerHumidity(way: WayRound, index: number): number {
+function layerHumidity(way: WayRound, index: number): number {
   const outer = way.interfaceHumidity[index] ?? NaN;
   const inner = way.interfaceHumidity[index + 1] ?? NaN;
   return (outer + inner) / 2;

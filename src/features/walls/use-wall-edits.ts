@@ -13,8 +13,8 @@ export interface WallEdits {
 /** Ties the form's values to a history of edits. Two events between two drawings both count. */
 export function useWallEdits(onChange: (wall: WallDraft) => void): WallEdits {
   const formik = useFormikContext<WallDraft>();
-  const latest = useRef<WallHistory>(historyOf(formik.values));
-  const [history, setHistory] = useState(latest.current);
+  const [history, setHistory] = useState<WallHistory>(() => historyOf(formik.values));
+  const latest = useRef(history);
   const tell = useRef(onChange);
   useEffect(() => {
     tell.current = onChange;

@@ -26,6 +26,7 @@ import {
 } from '../../ui';
 import { builtLayers } from './built-layer';
 import { LayerList } from './components/layer-list';
+import { PermeanceAnswers } from './components/test-answers';
 import { WallConflict } from './components/wall-conflict';
 import { WallView } from './components/wall-view';
 import type { MaterialBook } from './material-book';
@@ -69,13 +70,17 @@ export function WallBuilder({ opened, book, returnTo, createdMaterialId }: WallB
     { accountId: account.id, collection: 'laminates' },
     opened === null ? null : { id: opened.id, revisionId: start.baseRevisionId ?? opened.revision.id },
   );
+  const [said, setSaid] = useState('');
   const nameFor = (wall: WallDraft) => suggestedNameOf(wall, book, unitSystem);
   const toSpec = (wall: WallDraft) => specFromDraft(wall, nameFor(wall));
 
   const finish = (saved: KeptLaminate | null) => {
     if (saved === null) return;
     draft.clear();
-    if (saved.id === opened?.id) return;
+    if (saved.id === opened?.id) {
+      setSaid(`Saved as revision ${saved.revision.number}.`);
+      return;
+    }
     const otherwise = `${account.basePath}/walls/${saved.id}`;
     const created = { collection: 'laminates' as const, id: saved.id };
     router.replace(addressAfterCreating(created, { returnTo, basePath: account.basePath, otherwise }));
@@ -97,7 +102,9 @@ export function WallBuilder({ opened, book, returnTo, createdMaterialId }: WallB
         createdMaterialId={createdMaterialId}
         suggest={nameFor}
         toSpec={toSpec}
+        said={said}
         onChange={(wall) => {
+          setSaid('');
           if (isUntouched(toSpec(wall), opened)) draft.clear();
           else draft.save({ wall, baseRevisionId: saver.baseRevisionId() });
         }}
@@ -113,6 +120,8 @@ interface BuilderBodyProps {
   book: MaterialBook;
   saver: KeptThingSaver<LaminateSpec>;
   isRestored: boolean;
+  /** 'Saved as revision 3.' until the next change. */
+  said: string;
   createdMaterialId: string | undefined;
   suggest: (wall: WallDraft) => string;
   toSpec: (wall: WallDraft) => LaminateSpec;
@@ -135,7 +144,12 @@ function BuilderBody(props: BuilderBodyProps) {
   const layers = useMemo(() => builtLayers(wall, book, unitSystem), [wall, book, unitSystem]);
   const preview = useMemo(() => {
     const chosen = sidesFromText(sides, unitSystem);
-    return layers === null || chosen === null ? null : wallPreview(layers.map((layer) => layer.description), chosen);
+    return layers === null || chosen === null
+      ? null
+      : wallPreview(
+          layers.map((layer) => layer.description),
+          chosen,
+        );
   }, [layers, sides, unitSystem]);
 
   const openDraft = (next: WallDraft) => {
@@ -144,10 +158,13 @@ function BuilderBody(props: BuilderBodyProps) {
   };
   const settle = (saving: Promise<KeptLaminate | null>) => {
     setFault(null);
-    saving.then(props.onFinished, (error: unknown) => setFault(describeError(error, 'The wall could not be saved')));
+    saving.then(props.onFinished, (error: unknown) =>
+      setFault(describeError(error, 'The wall could not be saved')),
+    );
   };
   const name = wall.isNameTyped ? wall.name : props.suggest(wall);
-  const createdName = book.materials.find((material) => material.id === props.createdMaterialId)?.revision.spec.name;
+  const createdName = book.materials.find((material) => material.id === props.createdMaterialId)?.revision
+    .spec.name;
   const address = `${account.basePath}/walls/${opened?.id ?? 'new'}`;
 
   return (
@@ -186,7 +203,16 @@ function BuilderBody(props: BuilderBodyProps) {
           onSaveAsNew={() => settle(saver.saveAsNew(props.toSpec(wall)))}
         />
       )}
-      <View style={{ flexDirection: isSideBySide ? 'row' : 'column', alignItems: isSideBySide ? 'flex-start' : 'stretch', gap: SPACE.x4 }}>
+      {isSideBySide || preview === null ? null : (
+        <PermeanceAnswers preview={preview} label="The answer now" />
+      )}
+      <View
+        style={{
+          flexDirection: isSideBySide ? 'row' : 'column',
+          alignItems: isSideBySide ? 'flex-start' : 'stretch',
+          gap: SPACE.x4,
+        }}
+      >
         <View style={{ flex: isSideBySide ? 1 : undefined, minWidth: 0, gap: SPACE.x4 }}>
           <LayerList
             edits={edits}
@@ -197,7 +223,7 @@ function BuilderBody(props: BuilderBodyProps) {
             searchAtFirst={createdName ?? ''}
           />
           {hasRole(account, ['engineer']) ? (
-            <SaveSheet edits={edits} opened={opened} suggestion={props.suggest(wall)} />
+            <SaveSheet edits={edits} opened={opened} suggestion={props.suggest(wall)} said={props.said} />
           ) : (
             <Notice>Try what you like; saving walls is for engineers.</Notice>
           )}
@@ -215,9 +241,10 @@ interface SaveSheetProps {
   edits: WallEdits;
   opened: KeptLaminate | null;
   suggestion: string;
+  said: string;
 }
 
-function SaveSheet({ edits, opened, suggestion }: SaveSheetProps) {
+function SaveSheet({ edits, opened, suggestion, said }: SaveSheetProps) {
   const { wall, happened } = edits;
   const field = useFieldBinding('name');
   return (
@@ -235,7 +262,11 @@ function SaveSheet({ edits, opened, suggestion }: SaveSheetProps) {
         }}
       />
       {wall.isNameTyped && suggestion !== '' && wall.name !== suggestion ? (
-        <Button label={`Call it ${suggestion}`} kind="quiet" onPress={() => happened({ type: 'suggested_name_taken' })} />
+        <Button
+          label={`Call it ${suggestion}`}
+          kind="quiet"
+          onPress={() => happened({ type: 'suggested_name_taken' })}
+        />
       ) : null}
       <FormErrors />
       <Inline>
@@ -244,7 +275,7 @@ function SaveSheet({ edits, opened, suggestion }: SaveSheetProps) {
       {opened === null ? null : (
         <Small>{`Revision ${opened.revision.number} stays as it is; results pinned to it do not change.`}</Small>
       )}
-      <StatusLine message={opened === null || opened.revision.number === 1 ? '' : `Now at revision ${opened.revision.number}.`} />
+      <StatusLine message={said} />
     </Sheet>
   );
 }
@@ -252,10 +283,17 @@ function SaveSheet({ edits, opened, suggestion }: SaveSheetProps) {
 /** Nothing to keep: an empty new wall, or the very revision that is open. */
 function isUntouched(spec: LaminateSpec, opened: KeptLaminate | null): boolean {
   if (opened === null) return spec.layers.length === 0 && spec.name === '';
-  return JSON.stringify([spec.name, spec.layers]) === JSON.stringify([opened.revision.spec.name, opened.revision.spec.layers]);
+  return (
+    JSON.stringify([spec.name, spec.layers]) ===
+    JSON.stringify([opened.revision.spec.name, opened.revision.spec.layers])
+  );
 }
 
-function suggestedNameOf(wall: WallDraft, book: MaterialBook, unitSystem: ReturnType<typeof useUnitSystem>): string {
+function suggestedNameOf(
+  wall: WallDraft,
+  book: MaterialBook,
+  unitSystem: ReturnType<typeof useUnitSystem>,
+): string {
   const named = wall.layers.flatMap((layer) => {
     const material = book.revisionOf(layer)?.spec;
     return material === undefined ? [] : [{ material, thicknessUm: gaugeUm(layer.gauge) }];
@@ -268,7 +306,11 @@ interface TitleBlockContext {
   unitSystem: ReturnType<typeof useUnitSystem>;
 }
 
-function titleBlockCells(wall: WallDraft, opened: KeptLaminate | null, { book, unitSystem }: TitleBlockContext) {
+function titleBlockCells(
+  wall: WallDraft,
+  opened: KeptLaminate | null,
+  { book, unitSystem }: TitleBlockContext,
+) {
   const gauges = wall.layers.map((layer) => gaugeUm(layer.gauge));
   const weak = wall.layers.filter((layer) => {
     const material = book.revisionOf(layer)?.spec;

@@ -1,5 +1,13 @@
 import { describe, expect, it } from 'vitest';
-import { draftFromSpec, EMPTY_WALL, gaugeFromUm, gaugeUm, specFromDraft, wallAfter, type WallDraft } from './wall-draft';
+import {
+  draftFromSpec,
+  EMPTY_WALL,
+  gaugeFromUm,
+  gaugeUm,
+  specFromDraft,
+  wallAfter,
+  type WallDraft,
+} from './wall-draft';
 import { historyAfter, historyOf } from './wall-history';
 
 const PET = { material_id: 'pet', material_revision_id: 'pet-1' };
@@ -73,7 +81,9 @@ describe('historyAfter', () => {
     expect(materialsOf(once.present)).toEqual(['pet', 'ldpe']);
     const twice = historyAfter(once, { type: 'undone' });
     expect(twice.present).toEqual(wall);
-    expect(historyAfter(historyAfter(twice, { type: 'redone' }), { type: 'redone' }).present).toEqual(turned.present);
+    expect(historyAfter(historyAfter(twice, { type: 'redone' }), { type: 'redone' }).present).toEqual(
+      turned.present,
+    );
   });
 
   it('takes a run of typing in one field as one step, until the field is left', () => {
@@ -98,11 +108,20 @@ describe('historyAfter', () => {
 describe('specFromDraft', () => {
   it('sends µm and keeps what was typed in mil', () => {
     const wall = threeLayers();
-    const inMil = wallAfter(wall, { type: 'gauge_typed', key: wall.layers[0]!.key, text: '0.48', unit: 'mil' });
+    const inMil = wallAfter(wall, {
+      type: 'gauge_typed',
+      key: wall.layers[0]!.key,
+      text: '0.48',
+      unit: 'mil',
+    });
     const spec = specFromDraft(inMil, 'PET 0.48');
     expect(spec.layers[0]!.thickness_um).toBe(12.192);
     expect(spec.typed).toEqual({ 'layers[0].thickness_um': { value: 0.48, unit: 'mil' } });
-    expect(draftFromSpec(spec, 'metric').layers[0]!.gauge).toEqual({ text: '0.48', unit: 'mil', storedUm: 12.192 });
+    expect(draftFromSpec(spec, 'metric').layers[0]!.gauge).toEqual({
+      text: '0.48',
+      unit: 'mil',
+      storedUm: 12.192,
+    });
   });
 
   it('leaves a stored gauge exactly alone where it was only shown in mil', () => {
@@ -115,6 +134,8 @@ describe('specFromDraft', () => {
   it('takes the suggested name until one is typed', () => {
     const wall = threeLayers();
     expect(specFromDraft(wall, 'PET 12').name).toBe('PET 12');
-    expect(specFromDraft(wallAfter(wall, { type: 'name_typed', name: ' Nuts ' }), 'PET 12').name).toBe('Nuts');
+    expect(specFromDraft(wallAfter(wall, { type: 'name_typed', name: ' Nuts ' }), 'PET 12').name).toBe(
+      'Nuts',
+    );
   });
 });

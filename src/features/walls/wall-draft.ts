@@ -94,7 +94,7 @@ function moved(layers: DraftLayer[], key: string, by: number): DraftLayer[] {
   return layers.toSpliced(from, 1).toSpliced(to, 0, layer);
 }
 
-export function gaugeUnitOf(unitSystem: DisplayUnitSystem): GaugeUnit {
+function gaugeUnitOf(unitSystem: DisplayUnitSystem): GaugeUnit {
   return unitSystem === 'metric' ? 'um' : 'mil';
 }
 
@@ -149,7 +149,7 @@ export function specFromDraft(wall: WallDraft, suggestedName: string): LaminateS
   };
 }
 
-export function gaugePath(index: number): string {
+function gaugePath(index: number): string {
   return `layers[${index}].thickness_um`;
 }
 

@@ -15,7 +15,9 @@ export function wallFieldName(path: string): string {
 /** Judged by the contract's schema; gauges in the unit they were typed in. */
 export function wallFaults(wall: WallDraft, suggestedName: string): FormikErrors<WallDraft> {
   const faults: Record<string, string> = {};
-  for (const [path, message] of Object.entries(specFaults(laminateSpecSchema, specFromDraft(wall, suggestedName)))) {
+  for (const [path, message] of Object.entries(
+    specFaults(laminateSpecSchema, specFromDraft(wall, suggestedName)),
+  )) {
     const gauge = wall.layers[Number(GAUGE_PATH.exec(path)?.[2] ?? -1)]?.gauge;
     const isPlain = gauge === undefined || (gauge.unit === 'um' && Number.isFinite(parseNumber(gauge.text)));
     faults[wallFieldName(path)] = isPlain
@@ -51,7 +53,8 @@ export function isWallDraft(value: unknown): value is WallDraft {
 
 function isDraftLayer(value: unknown): boolean {
   if (typeof value !== 'object' || value === null) return false;
-  if (!('key' in value && 'material_id' in value && 'material_revision_id' in value && 'gauge' in value)) return false;
+  if (!('key' in value && 'material_id' in value && 'material_revision_id' in value && 'gauge' in value))
+    return false;
   const { gauge } = value;
   return (
     typeof gauge === 'object' &&

@@ -6,7 +6,12 @@ import { turnedRoundInWords } from './turned-round-words';
 import { stateBetween, wallPreview } from './wall-preview';
 
 /** Oxygen as the check of the whole product states it; water typical for each. */
-function film(name: string, thickness_um: number, oxygen: { value: number; curve?: [number, number][] }, water: number): LayerDescription {
+function film(
+  name: string,
+  thickness_um: number,
+  oxygen: { value: number; curve?: [number, number][] },
+  water: number,
+): LayerDescription {
   const curve = oxygen.curve;
   return {
     kind: 'film',
@@ -37,7 +42,19 @@ function film(name: string, thickness_um: number, oxygen: { value: number; curve
 
 const WALL = [
   film('PET', 12, { value: 1600 }, 557),
-  film('EVOH', 5, { value: 10, curve: [[0.6, 1], [0.8, 9], [0.9, 100]] }, 1500),
+  film(
+    'EVOH',
+    5,
+    {
+      value: 10,
+      curve: [
+        [0.6, 1],
+        [0.8, 9],
+        [0.9, 100],
+      ],
+    },
+    1500,
+  ),
   film('LDPE', 50, { value: 177165 }, 467),
 ];
 

@@ -71,14 +71,19 @@ function WallPanes({ opened }: { opened: KeptLaminate | null }) {
         <View style={{ flex: 1, minWidth: 0, gap: SPACE.x4 }}>
           {book.isPending ? <LoadingState what="Fetching the materials" /> : null}
           {book.error === null ? null : (
-            <FailedState {...describeError(book.error, 'The materials could not be fetched')} onRetry={book.retry} />
+            <FailedState
+              {...describeError(book.error, 'The materials could not be fetched')}
+              onRetry={book.retry}
+            />
           )}
           {book.isPending || book.error !== null ? null : (
             <WallBuilder
               opened={opened}
               book={book}
               returnTo={returnTo}
-              createdMaterialId={created?.startsWith('materials:') === true ? created.slice('materials:'.length) : undefined}
+              createdMaterialId={
+                created?.startsWith('materials:') === true ? created.slice('materials:'.length) : undefined
+              }
             />
           )}
         </View>
@@ -91,6 +96,7 @@ function WallsBeside({ currentId }: { currentId: string | undefined }) {
   const account = useAccount();
   const walls = useQuery(keptThingsQueries(account.id, 'laminates').all());
   const materials = useQuery(keptThingsQueries(account.id, 'materials').all());
+  if (walls.data?.length === 0) return null;
   return (
     <View style={{ width: LIST_WIDTH_PX }}>
       <WallList walls={walls.data ?? []} materials={materials.data ?? []} currentId={currentId} />

@@ -6,13 +6,20 @@ const TRUSTED_BEYOND_K = 15;
 const ROUNDING = 1e-9;
 
 /** Where the answer under the chosen conditions leans on more than was measured. */
-export function wallWarnings(layers: LayerDescription[], state: WallState, unitSystem: DisplayUnitSystem): string[] {
+export function wallWarnings(
+  layers: LayerDescription[],
+  state: WallState,
+  unitSystem: DisplayUnitSystem,
+): string[] {
   const warnings = layers.flatMap((layer, index) => {
     if (layer.kind === 'foil') return pinholeWarnings(layer);
     const faces = state.water.interface_relative_humidity.slice(index, index + 2);
     const gases = (['oxygen', 'water'] as const).flatMap((gas) => [
       ...humidityWarnings(`${layer.name}, ${gas}`, layer[gas].humidity_curve?.relative_humidity, faces),
-      ...temperatureWarnings(`${layer.name}, ${gas}`, layer[gas], { temperature_C: state.temperature_C, unitSystem }),
+      ...temperatureWarnings(`${layer.name}, ${gas}`, layer[gas], {
+        temperature_C: state.temperature_C,
+        unitSystem,
+      }),
     ]);
     return layer.kind === 'coating' ? [...gases, ...pinholeWarnings(layer)] : gases;
   });
@@ -44,7 +51,8 @@ function temperatureWarnings(
   gas: MeasuredAt,
   at: { temperature_C: number; unitSystem: DisplayUnitSystem },
 ): string[] {
-  const shown = (value: number) => formatQuantity(value, 'temperature_C', { unitSystem: at.unitSystem, isExact: true }).text;
+  const shown = (value: number) =>
+    formatQuantity(value, 'temperature_C', { unitSystem: at.unitSystem, isExact: true }).text;
   const reference = gas.reference_temperature_C ?? 23;
   const min = gas.measured_temperature_min_C;
   const max = gas.measured_temperature_max_C;
@@ -58,7 +66,10 @@ function temperatureWarnings(
   const isBelow = min !== undefined && at.temperature_C < min - TRUSTED_BEYOND_K;
   const isAbove = max !== undefined && at.temperature_C > max + TRUSTED_BEYOND_K;
   if (!isBelow && !isAbove) return [];
-  const range = [min, max].filter((value) => value !== undefined).map(shown).join(' to ');
+  const range = [min, max]
+    .filter((value) => value !== undefined)
+    .map(shown)
+    .join(' to ');
   return [`${words}: measured at ${range}; ${shown(at.temperature_C)} lies more than 15 K outside.`];
 }
 

@@ -36,12 +36,19 @@ export function WallsScreen() {
       </Screen>
     );
   }
-  const found = walls.data.filter((wall) => wall.revision.spec.name.toLowerCase().includes(search.trim().toLowerCase()));
+  const found = walls.data.filter((wall) =>
+    wall.revision.spec.name.toLowerCase().includes(search.trim().toLowerCase()),
+  );
   return (
-    <Screen title="Walls" subtitle="Laminates, layer by layer, from the outside face to the inside face." action={newWall}>
+    <Screen
+      title="Walls"
+      subtitle="Laminates, layer by layer, from the outside face to the inside face."
+      action={newWall}
+    >
       {walls.data.length === 0 ? (
         <EmptyState title="No wall yet" action={newWall}>
-          A wall is a laminate: its layers in order, each a material at a gauge. Build one and it answers at once.
+          A wall is a laminate: its layers in order, each a material at a gauge. Build one and it answers at
+          once.
         </EmptyState>
       ) : (
         <>

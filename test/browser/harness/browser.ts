@@ -1,7 +1,13 @@
 import { mkdirSync } from 'node:fs';
 import path from 'node:path';
-import { chromium, type Browser, type BrowserContextOptions, type Page } from 'playwright-core';
-import { expect } from 'vitest';
+import {
+  chromium,
+  type Browser,
+  type BrowserContextOptions,
+  type Locator,
+  type Page,
+} from 'playwright-core';
+import { expect, onTestFailed } from 'vitest';
 import { ROOT } from '../../harness/source-files';
 import { collectPageFaults, type PageFaults } from './page-faults';
 
@@ -29,6 +35,8 @@ export const DEVICES = {
 export interface JourneyPage {
   page: Page;
   faults: PageFaults;
+  /** With a finger where the device has a touch screen, with the mouse elsewhere. */
+  press: (target: Locator) => Promise<void>;
   /** Closes the page; fails when anything went wrong on it that no journey allowed. */
   close: () => Promise<void>;
 }
@@ -57,13 +65,21 @@ async function openPage(browser: Browser, options: BrowserContextOptions): Promi
     await context.close();
     expect(faults.list(), 'faults on the page').toEqual([]);
   };
-  return { page, faults, close };
+  onTestFailed(async ({ task }) => {
+    if (page.isClosed()) return;
+    await screenshot(page, `failed-${task.id}`);
+    await context.close();
+  });
+  const press = (target: Locator) => (options.hasTouch === true ? target.tap() : target.click());
+  return { page, faults, press, close };
 }
 
 /** Kept in test-results/screenshots after the run, for people to look at. */
 export async function screenshot(page: Page, name: string, { isFullPage = true } = {}): Promise<void> {
   const folder = path.join(ROOT, 'test-results', 'screenshots');
   mkdirSync(folder, { recursive: true });
+  // A bar that stays in sight would stand in the middle of a long page.
+  if (isFullPage) await page.evaluate(() => window.scrollTo(0, 0));
   await page.screenshot({
     path: path.join(folder, `${name}.png`),
     fullPage: isFullPage,

@@ -1,1 +1,1 @@
-export { TeamScreen as default } from '../../../../src/features/landing/team-screen';
+export { TeamScreen as default } from '../../../../src/features/workbench/lazy-screens';

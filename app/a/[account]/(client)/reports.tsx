@@ -1,1 +1,1 @@
-export { ReportsScreen as default } from '../../../../src/features/landing/reports-screen';
+export { ReportsScreen as default } from '../../../../src/features/workbench/lazy-screens';

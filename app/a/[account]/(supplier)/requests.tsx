@@ -1,1 +1,1 @@
-export { RequestsScreen as default } from '../../../../src/features/landing/requests-screen';
+export { RequestsScreen as default } from '../../../../src/features/workbench/lazy-screens';

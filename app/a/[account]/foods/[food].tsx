@@ -1,1 +1,1 @@
-export { FoodScreen as default } from '../../../../src/features/foods/food-screen';
+export { FoodScreen as default } from '../../../../src/features/workbench/lazy-screens';

@@ -1,1 +1,1 @@
-export { FoodsScreen as default } from '../../../../src/features/foods/foods-screen';
+export { FoodsScreen as default } from '../../../../src/features/workbench/lazy-screens';

@@ -1,1 +1,1 @@
-export { NewFoodScreen as default } from '../../../../src/features/foods/food-screen';
+export { NewFoodScreen as default } from '../../../../src/features/workbench/lazy-screens';

@@ -1,1 +1,1 @@
-export { MaterialScreen as default } from '../../../../src/features/materials/material-screen';
+export { MaterialScreen as default } from '../../../../src/features/workbench/lazy-screens';

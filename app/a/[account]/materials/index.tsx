@@ -1,1 +1,1 @@
-export { MaterialsScreen as default } from '../../../../src/features/materials/materials-screen';
+export { MaterialsScreen as default } from '../../../../src/features/workbench/lazy-screens';

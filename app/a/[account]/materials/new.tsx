@@ -1,1 +1,1 @@
-export { NewMaterialScreen as default } from '../../../../src/features/materials/material-screen';
+export { NewMaterialScreen as default } from '../../../../src/features/workbench/lazy-screens';

@@ -1,1 +1,1 @@
-export { PackScreen as default } from '../../../../src/features/packs/pack-screen';
+export { PackScreen as default } from '../../../../src/features/workbench/lazy-screens';

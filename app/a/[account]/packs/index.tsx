@@ -1,1 +1,1 @@
-export { PacksScreen as default } from '../../../../src/features/packs/packs-screen';
+export { PacksScreen as default } from '../../../../src/features/workbench/lazy-screens';

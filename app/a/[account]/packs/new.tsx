@@ -1,1 +1,1 @@
-export { NewPackScreen as default } from '../../../../src/features/packs/pack-screen';
+export { NewPackScreen as default } from '../../../../src/features/workbench/lazy-screens';

@@ -1,1 +1,1 @@
-export { RouteScreen as default } from '../../../../src/features/routes/route-screen';
+export { RouteScreen as default } from '../../../../src/features/workbench/lazy-screens';

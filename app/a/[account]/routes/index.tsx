@@ -1,1 +1,1 @@
-export { RoutesScreen as default } from '../../../../src/features/routes/routes-screen';
+export { RoutesScreen as default } from '../../../../src/features/workbench/lazy-screens';

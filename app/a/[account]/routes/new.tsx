@@ -1,1 +1,1 @@
-export { NewRouteScreen as default } from '../../../../src/features/routes/route-screen';
+export { NewRouteScreen as default } from '../../../../src/features/workbench/lazy-screens';

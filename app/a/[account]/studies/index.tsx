@@ -1,1 +1,1 @@
-export { StudiesListScreen as default } from '../../../../src/features/studies/studies-list-screen';
+export { StudiesListScreen as default } from '../../../../src/features/workbench/lazy-screens';

@@ -1,1 +1,1 @@
-export { NewStudyScreen as default } from '../../../../src/features/studies/study-form-screen';
+export { NewStudyScreen as default } from '../../../../src/features/workbench/lazy-screens';

@@ -1,1 +1,1 @@
-export { WallScreen as default } from '../../../../src/features/walls/wall-screen';
+export { WallScreen as default } from '../../../../src/features/workbench/lazy-screens';

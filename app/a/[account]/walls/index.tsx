@@ -1,1 +1,1 @@
-export { WallsScreen as default } from '../../../../src/features/walls/walls-screen';
+export { WallsScreen as default } from '../../../../src/features/workbench/lazy-screens';

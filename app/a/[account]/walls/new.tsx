@@ -1,1 +1,1 @@
-export { NewWallScreen as default } from '../../../../src/features/walls/wall-screen';
+export { NewWallScreen as default } from '../../../../src/features/workbench/lazy-screens';

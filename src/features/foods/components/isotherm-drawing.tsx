@@ -30,7 +30,13 @@ export function IsothermDrawing({ isotherm }: { isotherm: IsothermDescription })
         ],
         rows: ACTIVITIES.flatMap((activity, index) =>
           index % 5 === 0
-            ? [{ id: String(index), activity: formatNumber(activity), moisture: formatNumber(inPercent[index] ?? NaN) }]
+            ? [
+                {
+                  id: String(index),
+                  activity: formatNumber(activity),
+                  moisture: formatNumber(inPercent[index] ?? NaN),
+                },
+              ]
             : [],
         ),
       }}
@@ -59,8 +65,13 @@ function Curve({ moistures, width }: { moistures: number[]; width: number }) {
   const most = Math.max(...moistures, 1e-9);
   const least = Math.min(...moistures, 0);
   const toX = (index: number) => LEFT_PX + ((width - LEFT_PX - 12) * index) / STEPS;
-  const toY = (moisture: number) => TOP_PX + (HEIGHT_PX - TOP_PX - BOTTOM_PX) * (1 - (moisture - least) / (most - least));
-  const line = moistures.map((moisture, index) => `${index === 0 ? 'M' : 'L'}${toX(index).toFixed(1)} ${toY(moisture).toFixed(1)}`).join('');
+  const toY = (moisture: number) =>
+    TOP_PX + (HEIGHT_PX - TOP_PX - BOTTOM_PX) * (1 - (moisture - least) / (most - least));
+  const line = moistures
+    .map(
+      (moisture, index) => `${index === 0 ? 'M' : 'L'}${toX(index).toFixed(1)} ${toY(moisture).toFixed(1)}`,
+    )
+    .join('');
   return (
     <Svg width={width} height={HEIGHT_PX} aria-hidden>
       <Line x1={LEFT_PX} x2={width - 12} y1={toY(least)} y2={toY(least)} stroke={colors.inkSecond} />
@@ -73,7 +84,12 @@ function Curve({ moistures, width }: { moistures: number[]; width: number }) {
         {formatNumber(least)}
       </ChartText>
       {[0, 0.3, 0.6, 0.9].map((activity) => (
-        <ChartText key={activity} x={toX((activity / LAST_ACTIVITY) * STEPS)} y={HEIGHT_PX - 12} anchor="middle">
+        <ChartText
+          key={activity}
+          x={toX((activity / LAST_ACTIVITY) * STEPS)}
+          y={HEIGHT_PX - 12}
+          anchor="middle"
+        >
           {String(activity)}
         </ChartText>
       ))}

@@ -1,7 +1,16 @@
 import { useFormikContext } from 'formik';
 import { View } from 'react-native';
 import { useUnitSystem } from '../../../session';
-import { Button, FormNumberField, IconButton, Inline, Small, SPACE, Choice, useFieldBinding } from '../../../ui';
+import {
+  Button,
+  FormNumberField,
+  IconButton,
+  Inline,
+  Small,
+  SPACE,
+  Choice,
+  useFieldBinding,
+} from '../../../ui';
 import { curveDisagreement, curveInMode, type CurveMode } from '../gas-form-values';
 import type { MaterialFormValues } from '../material-form-values';
 import { unitInPrint, type Gas } from '../unit-choice';
@@ -55,11 +64,17 @@ export function CurveFields({ gas }: { gas: Gas }) {
       />
       {values.curve_mode === 'none' ? null : (
         <>
-          <Small>{values.curve_mode === 'values' ? `Values in ${unit}.` : 'Factors on the value above.'}</Small>
+          <Small>
+            {values.curve_mode === 'values' ? `Values in ${unit}.` : 'Factors on the value above.'}
+          </Small>
           {values.curve.map((row, index) => (
             <View key={row.key} style={{ flexDirection: 'row', alignItems: 'flex-end', gap: SPACE.x2 }}>
               <View style={{ width: 118 }}>
-                <FormNumberField name={`${gas}.curve[${index}].relative_humidity`} label={`Humidity ${index + 1}`} unit="%" />
+                <FormNumberField
+                  name={`${gas}.curve[${index}].relative_humidity`}
+                  label={`Humidity ${index + 1}`}
+                  unit="%"
+                />
               </View>
               <View style={{ flexGrow: 1, flexShrink: 1, minWidth: 0 }}>
                 <FormNumberField
@@ -67,7 +82,11 @@ export function CurveFields({ gas }: { gas: Gas }) {
                   label={values.curve_mode === 'values' ? `Value ${index + 1}` : `Factor ${index + 1}`}
                 />
               </View>
-              <IconButton icon="remove" label={`Remove point ${index + 1} of the ${gas} curve`} onPress={() => removeRow(row.key)} />
+              <IconButton
+                icon="remove"
+                label={`Remove point ${index + 1} of the ${gas} curve`}
+                onPress={() => removeRow(row.key)}
+              />
             </View>
           ))}
           <Inline>
@@ -82,6 +101,7 @@ export function CurveFields({ gas }: { gas: Gas }) {
 
 const MODE_HINTS: Record<CurveMode, string> = {
   none: 'Humidity does not change the value.',
-  values: 'The value at each humidity, rising. Between points the logarithm runs straight; beyond them the last value holds.',
+  values:
+    'The value at each humidity, rising. Between points the logarithm runs straight; beyond them the last value holds.',
   factors: 'How many times the value at each humidity, rising. Between points the logarithm runs straight.',
 };

@@ -20,10 +20,20 @@ export function GasFields({ gas, kind }: { gas: Gas; kind: LayerKind }) {
   const celsius = fieldUnit('temperature_C', unitSystem);
   const { unit } = values[gas].stated;
   const path = `${gas}.stated`;
-  const computed = computedGas(statedFrom(values[gas], { gas, kind, unitSystem, before: undefined }), { gas, kind });
+  const computed = computedGas(statedFrom(values[gas], { gas, kind, unitSystem, before: undefined }), {
+    gas,
+    kind,
+  });
   return (
-    <Sheet title={TITLES[gas]} subtitle={kind === 'film' ? 'For the material itself; it scales with the gauge.' : 'For the whole coating; its gauge does not scale it.'}>
-      <FieldGrid leastWidthPx={150}>
+    <Sheet
+      title={TITLES[gas]}
+      subtitle={
+        kind === 'film'
+          ? 'For the material itself; it scales with the gauge.'
+          : 'For the whole coating; its gauge does not scale it.'
+      }
+    >
+      <FieldGrid leastWidthPx={200}>
         <FormNumberField name={`${path}.value`} label="Value" />
         <FormSelect
           name={`${path}.unit`}
@@ -68,9 +78,13 @@ export function GasFields({ gas, kind }: { gas: Gas; kind: LayerKind }) {
           />
         ) : null}
       </FieldGrid>
-      <Small>{'block' in computed ? siInWords(gas, computed.block, unitSystem) : 'In SI: as soon as the value and its test are whole.'}</Small>
+      <Small>
+        {'block' in computed
+          ? siInWords(gas, computed.block, unitSystem)
+          : 'In SI: as soon as the value and its test are whole.'}
+      </Small>
       <CurveFields gas={gas} />
-      <FieldGrid>
+      <FieldGrid leastWidthPx={165}>
         <FormNumberField
           name={`${path}.activation_energy_J_per_mol`}
           label="Activation energy"
@@ -86,7 +100,7 @@ export function GasFields({ gas, kind }: { gas: Gas; kind: LayerKind }) {
         />
         <FormNumberField
           name={`${path}.measured_temperature_max_C`}
-          label="to"
+          label="Measured up to"
           unit={celsius}
           options={{ isOptional: true }}
         />
@@ -97,7 +111,7 @@ export function GasFields({ gas, kind }: { gas: Gas; kind: LayerKind }) {
           options={{ isOptional: true }}
         />
       </FieldGrid>
-      <FieldGrid leastWidthPx={150}>
+      <FieldGrid leastWidthPx={200}>
         <FormSelect
           name={`${gas}.ground.kind`}
           label="The value is"

@@ -66,9 +66,15 @@ function Curve({ gas, values, unit, width }: CurveProps) {
   const least = Math.floor(Math.min(...logs) + 1e-9);
   const most = Math.max(least + 1, Math.ceil(Math.max(...logs) - 1e-9));
   const toX = (humidity: number) => LEFT_PX + (width - LEFT_PX - 14) * humidity;
-  const toY = (log: number) => TOP_PX + (HEIGHT_PX - TOP_PX - BOTTOM_PX) * (1 - (log - least) / (most - least));
-  const placed = values.map((point, index) => ({ x: toX(point.relative_humidity), y: toY(logs[index] ?? least) }));
-  const line = placed.map((at, index) => `${index === 0 ? 'M' : 'L'}${at.x.toFixed(1)} ${at.y.toFixed(1)}`).join('');
+  const toY = (log: number) =>
+    TOP_PX + (HEIGHT_PX - TOP_PX - BOTTOM_PX) * (1 - (log - least) / (most - least));
+  const placed = values.map((point, index) => ({
+    x: toX(point.relative_humidity),
+    y: toY(logs[index] ?? least),
+  }));
+  const line = placed
+    .map((at, index) => `${index === 0 ? 'M' : 'L'}${at.x.toFixed(1)} ${at.y.toFixed(1)}`)
+    .join('');
   const first = placed[0];
   const last = placed.at(-1);
   const ink = gas === 'oxygen' ? colors.oxygen : colors.water;
@@ -76,7 +82,14 @@ function Curve({ gas, values, unit, width }: CurveProps) {
   return (
     <Svg width={width} height={HEIGHT_PX} aria-hidden>
       {powers.map((power) => (
-        <Line key={power} x1={LEFT_PX} x2={width - 14} y1={toY(power)} y2={toY(power)} stroke={colors.lineFaint} />
+        <Line
+          key={power}
+          x1={LEFT_PX}
+          x2={width - 14}
+          y1={toY(power)}
+          y2={toY(power)}
+          stroke={colors.lineFaint}
+        />
       ))}
       {powers.map((power) => (
         <ChartText key={power} x={LEFT_PX - 6} y={toY(power) + 4} anchor="end">
@@ -98,7 +111,12 @@ function Curve({ gas, values, unit, width }: CurveProps) {
         <Circle key={index} cx={at.x} cy={at.y} r={3.5} fill={colors.sheet} stroke={ink} strokeWidth={2} />
       ))}
       {[0, 0.5, 1].map((humidity) => (
-        <ChartText key={humidity} x={toX(humidity)} y={HEIGHT_PX - 9} anchor="middle">
+        <ChartText
+          key={humidity}
+          x={toX(humidity)}
+          y={HEIGHT_PX - 9}
+          anchor={humidity === 1 ? 'end' : 'middle'}
+        >
           {`${humidity * 100} %`}
         </ChartText>
       ))}

@@ -40,12 +40,21 @@ function GasFacts({ gas, spec }: { gas: Gas; spec: Exclude<MaterialSpec, { kind:
   const shown = shownCoefficient(gas, block, unitSystem);
   const ground = spec.provenance.find((entry) => entry.field === `${gas}.value`);
   return (
-    <Sheet title={TITLES[gas]} subtitle={ground === undefined ? undefined : `The value is ${provenanceInWords(ground.kind)}${ground.source === '' ? '' : `: ${ground.source}`}`}>
+    <Sheet
+      title={TITLES[gas]}
+      subtitle={
+        ground === undefined
+          ? undefined
+          : `The value is ${provenanceInWords(ground.kind)}${ground.source === '' ? '' : `: ${ground.source}`}`
+      }
+    >
       <View style={{ gap: SPACE.x1 }}>
         <Figure value={shown.figures} unit={shown.unit} size="title" isStrong />
         <Small>{`Stated as ${formatExact(stated.value)} ${unitInPrint(stated.unit)}, ${conditionsInWords(gas, stated, unitSystem)}.`}</Small>
         <Small>{temperatureInWords(stated, unitSystem)}</Small>
-        {geometric_sd === undefined ? null : <Small>{`Spread: a factor of ${formatExact(geometric_sd)} up or down.`}</Small>}
+        {geometric_sd === undefined ? null : (
+          <Small>{`Spread: a factor of ${formatExact(geometric_sd)} up or down.`}</Small>
+        )}
       </View>
       {points.length === 0 ? (
         <Small>Humidity does not change it.</Small>
@@ -53,7 +62,11 @@ function GasFacts({ gas, spec }: { gas: Gas; spec: Exclude<MaterialSpec, { kind:
         <HumidityCurveDrawing
           gas={gas}
           points={points}
-          stated={{ value: stated.value, unit: stated.unit, relative_humidity: block.reference_relative_humidity ?? 0 }}
+          stated={{
+            value: stated.value,
+            unit: stated.unit,
+            relative_humidity: block.reference_relative_humidity ?? 0,
+          }}
         />
       )}
       <Provenance spec={spec} prefix={gas} />
@@ -64,19 +77,26 @@ function GasFacts({ gas, spec }: { gas: Gas; spec: Exclude<MaterialSpec, { kind:
 function conditionsInWords(gas: Gas, stated: StatedValue, unitSystem: DisplayUnitSystem): string {
   const at = formatQuantity(stated.temperature_C, 'temperature_C', { unitSystem, isExact: true }).text;
   const percent = (fraction: number) => `${formatExact(Number((fraction * 100).toPrecision(4)))} %`;
-  if (gas === 'water' && stated.relative_humidity_high !== undefined && stated.relative_humidity_low !== undefined) {
+  if (
+    gas === 'water' &&
+    stated.relative_humidity_high !== undefined &&
+    stated.relative_humidity_low !== undefined
+  ) {
     return `at ${at} between ${percent(stated.relative_humidity_high)} and ${percent(stated.relative_humidity_low)}`;
   }
-  const humidity = stated.relative_humidity === undefined ? '' : `, ${percent(stated.relative_humidity)} on both sides`;
+  const humidity =
+    stated.relative_humidity === undefined ? '' : `, ${percent(stated.relative_humidity)} on both sides`;
   const fraction = stated.oxygen_mole_fraction_dry;
-  const testGas = fraction === undefined ? '' : fraction === 1 ? ', pure oxygen' : `, ${percent(fraction)} oxygen`;
+  const testGas =
+    fraction === undefined ? '' : fraction === 1 ? ', pure oxygen' : `, ${percent(fraction)} oxygen`;
   return `at ${at}${humidity}${testGas}`;
 }
 
 function temperatureInWords(stated: StatedValue, unitSystem: DisplayUnitSystem): string {
   const energy = stated.activation_energy_J_per_mol;
   if (energy === undefined || energy === 0) return 'No activation energy: the same at every temperature.';
-  const celsius = (value: number) => formatQuantity(value, 'temperature_C', { unitSystem, isExact: true }).text;
+  const celsius = (value: number) =>
+    formatQuantity(value, 'temperature_C', { unitSystem, isExact: true }).text;
   const { measured_temperature_min_C: min, measured_temperature_max_C: max } = stated;
   const range =
     min === undefined || max === undefined
@@ -86,7 +106,9 @@ function temperatureInWords(stated: StatedValue, unitSystem: DisplayUnitSystem):
 }
 
 function Provenance({ spec, prefix }: { spec: MaterialSpec; prefix: string }) {
-  const entries = spec.provenance.filter((entry) => entry.field === prefix || entry.field.startsWith(`${prefix}.`));
+  const entries = spec.provenance.filter(
+    (entry) => entry.field === prefix || entry.field.startsWith(`${prefix}.`),
+  );
   if (entries.length === 0) return null;
   return (
     <Disclosure label="Where each number comes from">
@@ -118,14 +140,18 @@ function ProvenanceTable({ entries, caption }: { entries: MaterialSpec['provenan
 function OtherFacts({ spec }: { spec: MaterialSpec }) {
   const unitSystem = useUnitSystem();
   const gauges = spec.typical_gauges_um
-    .map((gauge) => formatQuantity(gauge, 'thickness_um', { unitSystem, isExact: unitSystem === 'metric' }).text)
+    .map(
+      (gauge) => formatQuantity(gauge, 'thickness_um', { unitSystem, isExact: unitSystem === 'metric' }).text,
+    )
     .join(', ');
   const others = spec.provenance.filter((entry) => !/^(oxygen|water)\b/.test(entry.field));
   return (
     <Sheet title="Besides">
       <View style={{ gap: SPACE.x1 }}>
         <Small>{gauges === '' ? 'No usual gauges given.' : `Usual gauges: ${gauges}.`}</Small>
-        {spec.density_kg_per_m3 === null ? null : <Small>{`Density ${formatExact(spec.density_kg_per_m3)} kg/m³.`}</Small>}
+        {spec.density_kg_per_m3 === null ? null : (
+          <Small>{`Density ${formatExact(spec.density_kg_per_m3)} kg/m³.`}</Small>
+        )}
         {spec.notes === '' ? null : <Small tone="ink">{spec.notes}</Small>}
       </View>
       {others.length === 0 ? null : (

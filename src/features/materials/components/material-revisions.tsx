@@ -34,8 +34,14 @@ export function MaterialRevisions({ materialId }: { materialId: string }) {
             id,
             number: String(number),
             made: `${created_at.slice(0, 10)}${created_by === null ? ', came with the product' : ''}`,
-            oxygen: spec.kind === 'foil' ? 'pinholes only' : coefficientInWords('oxygen', spec.oxygen.gas, unitSystem),
-            water: spec.kind === 'foil' ? 'pinholes only' : coefficientInWords('water', spec.water.gas, unitSystem),
+            oxygen:
+              spec.kind === 'foil'
+                ? 'pinholes only'
+                : coefficientInWords('oxygen', spec.oxygen.gas, unitSystem),
+            water:
+              spec.kind === 'foil'
+                ? 'pinholes only'
+                : coefficientInWords('water', spec.water.gas, unitSystem),
           }))}
         />
       )}

@@ -12,7 +12,8 @@ const MARGIN_PX = 36;
 /** The pouch lying flat, to scale: outline, seals in tint, and its dimensions. */
 export function PouchDrawing({ pouch }: { pouch: PouchForm }) {
   const unitSystem = useUnitSystem();
-  const length = (mm: number) => formatQuantity(mm, 'length_mm', { unitSystem, isExact: unitSystem === 'metric' }).text;
+  const length = (mm: number) =>
+    formatQuantity(mm, 'length_mm', { unitSystem, isExact: unitSystem === 'metric' }).text;
   const gusset = pouch.gusset_depth_mm > 0 ? `, gusset folded ${length(pouch.gusset_depth_mm)} deep` : '';
   return (
     <ChartFrame
@@ -51,11 +52,26 @@ function Outline({ pouch, width, length }: OutlineProps) {
   const ink = { stroke: colors.inkSecond, strokeWidth: 1 };
   return (
     <Svg width={width} height={HEIGHT_PX} aria-hidden>
-      <Rect x={left} y={top} width={drawnWidth} height={drawnHeight} fill={colors.line} stroke={colors.ink} strokeWidth={1.2} />
+      <Rect
+        x={left}
+        y={top}
+        width={drawnWidth}
+        height={drawnHeight}
+        fill={colors.line}
+        stroke={colors.ink}
+        strokeWidth={1.2}
+      />
       <Rect {...inner} fill={colors.sheet} stroke={colors.inkSecond} strokeWidth={0.8} />
       {pouch.gusset_depth_mm > 0 ? (
         <G>
-          <Line x1={inner.x} x2={inner.x + inner.width} y1={gussetY} y2={gussetY} stroke={colors.ink} strokeDasharray="5 4" />
+          <Line
+            x1={inner.x}
+            x2={inner.x + inner.width}
+            y1={gussetY}
+            y2={gussetY}
+            stroke={colors.ink}
+            strokeDasharray="5 4"
+          />
           <ChartText x={inner.x + inner.width / 2} y={gussetY - 5} anchor="middle">
             {`gusset ${length(pouch.gusset_depth_mm)}`}
           </ChartText>

@@ -22,7 +22,12 @@ export function LegFields({ legKey, index, count, onEvent }: LegFieldsProps) {
     <View
       role="listitem"
       aria-label={`Leg ${index + 1}`}
-      style={{ gap: SPACE.x2, paddingBottom: SPACE.x3, borderBottomWidth: HAIRLINE_PX, borderBottomColor: colors.lineFaint }}
+      style={{
+        gap: SPACE.x2,
+        paddingBottom: SPACE.x3,
+        borderBottomWidth: HAIRLINE_PX,
+        borderBottomColor: colors.lineFaint,
+      }}
     >
       <View style={{ flexDirection: 'row', alignItems: 'flex-end', gap: SPACE.x1 }}>
         <View style={{ flexGrow: 1, flexShrink: 1, minWidth: 0 }}>
@@ -48,7 +53,11 @@ export function LegFields({ legKey, index, count, onEvent }: LegFieldsProps) {
         />
       </View>
       <FieldGrid leastWidthPx={96}>
-        <FormNumberField name={`${path}.temperature_C`} label="Temperature" unit={fieldUnit('temperature_C', unitSystem)} />
+        <FormNumberField
+          name={`${path}.temperature_C`}
+          label="Temperature"
+          unit={fieldUnit('temperature_C', unitSystem)}
+        />
         <FormNumberField name={`${path}.relative_humidity`} label="Humidity" unit="%" />
         <FormNumberField name={`${path}.days`} label="Days" unit="d" />
       </FieldGrid>

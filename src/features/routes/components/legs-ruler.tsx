@@ -21,10 +21,14 @@ const LABEL_FROM_PX = 44;
 /** The legs as a ruler of days, one after the other. */
 export function LegsRuler({ legs, afterLast }: { legs: RulerLeg[]; afterLast: 'hold' | 'repeat' }) {
   const unitSystem = useUnitSystem();
-  const temperature = (value: number) => formatQuantity(value, 'temperature_C', { unitSystem, isExact: true }).text;
+  const temperature = (value: number) =>
+    formatQuantity(value, 'temperature_C', { unitSystem, isExact: true }).text;
   const total = legs.reduce((sum, leg) => sum + leg.days, 0);
   const sentence = legs
-    .map((leg, index) => `${leg.name === '' ? `Leg ${index + 1}` : leg.name}: ${formatExact(leg.days)} days at ${temperature(leg.temperature_C)}, ${formatExact(leg.relative_humidity * 100)} %`)
+    .map(
+      (leg, index) =>
+        `${leg.name === '' ? `Leg ${index + 1}` : leg.name}: ${formatExact(leg.days)} days at ${temperature(leg.temperature_C)}, ${formatExact(leg.relative_humidity * 100)} %`,
+    )
     .join('; ');
   const end = afterLast === 'hold' ? 'then stays there' : 'then begins again';
   return (
@@ -44,16 +48,7 @@ interface RulerProps {
 
 function Ruler({ legs, width, total, end, temperature }: RulerProps) {
   const { colors } = useTheme();
-  const room = width - 2 - LEAST_LEG_PX * legs.length;
-  let x = 1;
-  let day = 0;
-  const drawn = legs.map((leg) => {
-    const legWidth = LEAST_LEG_PX + (room * leg.days) / total;
-    const at = { leg, x, legWidth, day };
-    x += legWidth;
-    day += leg.days;
-    return at;
-  });
+  const drawn = placedLegs(legs, { total, width });
   return (
     <Svg width={width} height={HEIGHT_PX} aria-hidden>
       {drawn.map(({ x: left, legWidth }, index) => (
@@ -91,4 +86,23 @@ function Ruler({ legs, width, total, end, temperature }: RulerProps) {
       </ChartText>
     </Svg>
   );
+}
+
+interface PlacedLeg {
+  leg: RulerLeg;
+  x: number;
+  legWidth: number;
+  /** The day on which it begins. */
+  day: number;
+}
+
+/** Widths in proportion to days, each leg at least wide enough to be seen. */
+function placedLegs(legs: RulerLeg[], { total, width }: { total: number; width: number }): PlacedLeg[] {
+  const room = width - 2 - LEAST_LEG_PX * legs.length;
+  return legs.reduce<PlacedLeg[]>((placed, leg) => {
+    const last = placed.at(-1);
+    const x = last === undefined ? 1 : last.x + last.legWidth;
+    const day = last === undefined ? 0 : last.day + last.leg.days;
+    return [...placed, { leg, x, day, legWidth: LEAST_LEG_PX + (room * leg.days) / total }];
+  }, []);
 }

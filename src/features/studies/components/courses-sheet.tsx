@@ -6,6 +6,9 @@ import { LIMIT_WORDS, daysFigures } from '../answer-words';
 import { thinned } from '../thinned-rows';
 import { useFigures, type Figures } from '../use-figures';
 
+/** A route of many legs is listed whole among the inputs. */
+const MOST_LEGS_NAMED = 12;
+
 export interface CoursesSheetProps {
   candidate: Candidate;
   targetDays: number;
@@ -74,7 +77,7 @@ export function CoursesSheet({ candidate, targetDays }: CoursesSheetProps) {
               (leg, index) =>
                 `${index + 1} ${leg.name ?? `leg ${index + 1}`}: ${show.exact(leg.temperature_C, 'temperature_C')}, ${show.exact(leg.relative_humidity, 'fraction_as_percent')}`,
             )
-            .slice(0, 6)
+            .slice(0, MOST_LEGS_NAMED)
             .join(' · ')}
         </Small>
       </Stack>

@@ -89,21 +89,23 @@ function CandidateAnswer({ result, candidate, hasTwoColumns }: CandidateAnswerPr
     );
   }
   return (
-    <View style={{ flexDirection: 'row', gap: SPACE.x4, alignItems: 'flex-start' }}>
-      <Column>
-        {answer}
-        {cautions}
-        {courses}
-        {transmission}
-        {inputs}
-      </Column>
-      <Column>
-        {section}
-        {shares}
-        {turned}
-        {own}
-      </Column>
-    </View>
+    <Stack>
+      <View style={{ flexDirection: 'row', gap: SPACE.x4, alignItems: 'flex-start' }}>
+        <Column>
+          {answer}
+          {cautions}
+          {courses}
+          {own}
+        </Column>
+        <Column>
+          {section}
+          {shares}
+          {turned}
+        </Column>
+      </View>
+      {transmission}
+      {inputs}
+    </Stack>
   );
 }
 

@@ -37,7 +37,13 @@ export function WallSheet(props: WallSheetProps) {
         onSelect={onSelectLayer}
       />
       {wall.legs.length > 1 ? (
-        <LegPicker wall={wall} leg={leg} onLegChange={onLegChange} show={show} />
+        <LegPicker
+          wall={wall}
+          leg={leg}
+          onLegChange={onLegChange}
+          show={show}
+          areAllShown={wall.legs.length >= candidate.description.route.legs.length}
+        />
       ) : null}
       <ChartWithTable
         label="Table of the stairs"
@@ -121,13 +127,14 @@ export function ShareSheet({
 }
 
 interface LegPickerProps {
+  areAllShown: boolean;
   wall: WallAnswer;
   leg: WallOnLeg;
   onLegChange: (leg: number) => void;
   show: Figures;
 }
 
-function LegPicker({ wall, leg, onLegChange, show }: LegPickerProps) {
+function LegPicker({ wall, leg, onLegChange, show, areAllShown }: LegPickerProps) {
   const isFew = wall.legs.length <= MOST_LEGS_IN_SIGHT;
   const options = wall.legs.map((one) => ({
     value: String(one.leg),
@@ -141,7 +148,7 @@ function LegPicker({ wall, leg, onLegChange, show }: LegPickerProps) {
   ) : (
     <Stack gap="x1">
       <Select label="Leg of the route" value={String(leg.leg)} onChange={onChange} options={options} />
-      <Small tone="third">Long routes show their first legs.</Small>
+      {areAllShown ? null : <Small tone="third">Of a long route the first legs are shown.</Small>}
     </Stack>
   );
 }

@@ -5,7 +5,14 @@ import type { MaterialBook } from '../material-book';
 import type { BuiltLayer } from '../built-layer';
 import type { WallPreview } from '../wall-preview';
 import { Button, Inline, Notice, Sheet, Small, SPACE, StatusLine } from '../../../ui';
-import { gaugeUm, type ChosenMaterial, type DraftGauge, type DraftLayer, type WallDraft, type WallEvent } from '../wall-draft';
+import {
+  gaugeUm,
+  type ChosenMaterial,
+  type DraftGauge,
+  type DraftLayer,
+  type WallDraft,
+  type WallEvent,
+} from '../wall-draft';
 import type { WallEdits } from '../use-wall-edits';
 import { keepFocusInRow } from './keep-focus-in-row';
 import { LayerRow, layerRowId } from './layer-row';
@@ -50,7 +57,8 @@ export function LayerList({ edits, book, layers, preview, newMaterialHref, searc
 
   const onChosen = (material: ChosenMaterial, gauge: DraftGauge) => {
     if (picking?.for === 'change') {
-      const isFilm = book.materials.find((each) => each.id === material.material_id)?.revision.spec.kind === 'film';
+      const isFilm =
+        book.materials.find((each) => each.id === material.material_id)?.revision.spec.kind === 'film';
       const keepsGauge = isFilm && Number.isFinite(gaugeUm(picking.layer.gauge));
       onEvent({
         type: 'material_changed',
@@ -73,8 +81,18 @@ export function LayerList({ edits, book, layers, preview, newMaterialHref, searc
       subtitle="From outside air at the top to the food at the bottom."
       action={
         <View style={{ flexDirection: 'row' }}>
-          <Button label="Undo" kind="quiet" isDisabled={!edits.canUndo} onPress={() => happened({ type: 'undone' })} />
-          <Button label="Redo" kind="quiet" isDisabled={!edits.canRedo} onPress={() => happened({ type: 'redone' })} />
+          <Button
+            label="Undo"
+            kind="quiet"
+            isDisabled={!edits.canUndo}
+            onPress={() => happened({ type: 'undone' })}
+          />
+          <Button
+            label="Redo"
+            kind="quiet"
+            isDisabled={!edits.canRedo}
+            onPress={() => happened({ type: 'redone' })}
+          />
         </View>
       }
     >

@@ -2,7 +2,17 @@ import type { KeyboardEvent } from 'react';
 import { Pressable, View } from 'react-native';
 import { HatchSwatch } from '../../../charts/mini-section';
 import type { MaterialSpec } from '../../../../shared/contract/materials';
-import { HAIRLINE_PX, IconButton, ROW_MIN_PX, SPACE, Small, Body, Stepper, useFieldBinding, useTheme } from '../../../ui';
+import {
+  HAIRLINE_PX,
+  IconButton,
+  ROW_MIN_PX,
+  SPACE,
+  Small,
+  Body,
+  Stepper,
+  useFieldBinding,
+  useTheme,
+} from '../../../ui';
 import { weakGroundInWords } from '../weak-ground';
 import type { DraftLayer, WallEvent } from '../wall-draft';
 
@@ -69,7 +79,13 @@ export function LayerRow(props: LayerRowProps) {
         />
       </View>
       <View style={{ flexDirection: 'row', alignItems: 'flex-start', justifyContent: 'space-between' }}>
-        <GaugeField layer={layer} index={index} title={title} onEvent={onEvent} onFieldLeft={props.onFieldLeft} />
+        <GaugeField
+          layer={layer}
+          index={index}
+          title={title}
+          onEvent={onEvent}
+          onFieldLeft={props.onFieldLeft}
+        />
         <View style={{ flexDirection: 'row' }}>
           <IconButton
             icon="duplicate"
@@ -99,9 +115,17 @@ function MaterialButton({ name, index, material, onPress }: MaterialButtonProps)
   return (
     <Pressable
       role="button"
-      aria-label={`Layer ${index + 1}: ${name}. Change the material`}
+      aria-label={`${index + 1} ${name}: change the material`}
       onPress={onPress}
-      style={{ flexDirection: 'row', alignItems: 'center', gap: SPACE.x2, flexGrow: 1, flexShrink: 1, minWidth: 0, minHeight: ROW_MIN_PX }}
+      style={{
+        flexDirection: 'row',
+        alignItems: 'center',
+        gap: SPACE.x2,
+        flexGrow: 1,
+        flexShrink: 1,
+        minWidth: 0,
+        minHeight: ROW_MIN_PX,
+      }}
     >
       <View style={{ width: 16 }}>
         <Small>{String(index + 1)}</Small>
@@ -166,7 +190,11 @@ function LayerFacts({ material, shares, newerRevision, onTakeNewerRevision }: La
       )}
       {weak === '' ? null : <Small tone="third">{weak}</Small>}
       {newerRevision === undefined ? null : (
-        <Pressable role="button" onPress={onTakeNewerRevision} style={{ minHeight: ROW_MIN_PX, justifyContent: 'center' }}>
+        <Pressable
+          role="button"
+          onPress={onTakeNewerRevision}
+          style={{ minHeight: ROW_MIN_PX, justifyContent: 'center' }}
+        >
           <Small tone="ink" weight="medium">{`Newer data exist: use revision ${newerRevision}`}</Small>
         </Pressable>
       )}

@@ -71,7 +71,8 @@ const GAUGE_WHERE_NONE_IS_USUAL_UM = 20;
 function PickedMaterial({ material, onChosen }: PickedMaterialProps) {
   const unitSystem = useUnitSystem();
   const { spec } = material.revision;
-  const gauges = spec.typical_gauges_um.length === 0 ? [GAUGE_WHERE_NONE_IS_USUAL_UM] : spec.typical_gauges_um;
+  const gauges =
+    spec.typical_gauges_um.length === 0 ? [GAUGE_WHERE_NONE_IS_USUAL_UM] : spec.typical_gauges_um;
   const weak = weakGroundInWords(spec);
   return (
     <View role="group" aria-label={spec.name} style={{ gap: SPACE.x1, paddingVertical: SPACE.x2 }}>
@@ -93,7 +94,9 @@ function PickedMaterial({ material, onChosen }: PickedMaterialProps) {
         {gauges.map((gaugeUm) => (
           <Button
             key={gaugeUm}
-            label={formatQuantity(gaugeUm, 'thickness_um', { unitSystem, isExact: unitSystem === 'metric' }).text}
+            label={
+              formatQuantity(gaugeUm, 'thickness_um', { unitSystem, isExact: unitSystem === 'metric' }).text
+            }
             onPress={() =>
               onChosen(
                 { material_id: material.id, material_revision_id: material.revision.id },

@@ -5,18 +5,12 @@ import { useUnitSystem } from '../../../session';
 import { DataTable, Disclosure, Figure, HAIRLINE_PX, Small, SPACE, useTheme } from '../../../ui';
 import type { WallPreview } from '../wall-preview';
 
-/** The permeance under the chosen conditions, large; the standard tests under it. */
+/** The permeances under the chosen conditions, large; the standard tests under them. */
 export function TestAnswers({ preview }: { preview: WallPreview }) {
   const unitSystem = useUnitSystem();
-  const { chosen } = preview;
-  const oxygen = formatQuantity(chosen.oxygen.permeance_mol_per_m2_s_Pa, 'oxygen_permeance_mol_per_m2_s_Pa', { unitSystem });
-  const water = formatQuantity(chosen.water.permeance_mol_per_m2_s_Pa, 'water_permeance_mol_per_m2_s_Pa', { unitSystem });
   return (
     <View style={{ gap: SPACE.x2 }}>
-      <View role="group" aria-label="Under these conditions" style={{ flexDirection: 'row', flexWrap: 'wrap', columnGap: SPACE.x6, rowGap: SPACE.x2 }}>
-        <Answer label="Oxygen permeance" shown={oxygen} gas="oxygen" />
-        <Answer label="Water vapour permeance" shown={water} gas="water" />
-      </View>
+      <PermeanceAnswers preview={preview} label="Under these conditions" />
       <Disclosure label="At the standard tests" isOpenAtFirst>
         <StandardTests tests={preview.tests} unitSystem={unitSystem} />
       </Disclosure>
@@ -24,10 +18,45 @@ export function TestAnswers({ preview }: { preview: WallPreview }) {
   );
 }
 
+/** Both permeances under the chosen conditions. */
+export function PermeanceAnswers({ preview, label }: { preview: WallPreview; label: string }) {
+  const unitSystem = useUnitSystem();
+  const { oxygen, water } = preview.chosen;
+  return (
+    <View
+      role="group"
+      aria-label={label}
+      style={{ flexDirection: 'row', flexWrap: 'wrap', columnGap: SPACE.x6, rowGap: SPACE.x2 }}
+    >
+      <Answer
+        label="Oxygen permeance"
+        shown={formatQuantity(oxygen.permeance_mol_per_m2_s_Pa, 'oxygen_permeance_mol_per_m2_s_Pa', {
+          unitSystem,
+        })}
+        gas="oxygen"
+      />
+      <Answer
+        label="Water vapour permeance"
+        shown={formatQuantity(water.permeance_mol_per_m2_s_Pa, 'water_permeance_mol_per_m2_s_Pa', {
+          unitSystem,
+        })}
+        gas="water"
+      />
+    </View>
+  );
+}
+
 function Answer({ label, shown, gas }: { label: string; shown: ShownQuantity; gas: 'oxygen' | 'water' }) {
   const { colors } = useTheme();
   return (
-    <View style={{ borderLeftWidth: HAIRLINE_PX * 3, borderLeftColor: colors[gas], paddingLeft: SPACE.x2, gap: 2 }}>
+    <View
+      style={{
+        borderLeftWidth: HAIRLINE_PX * 3,
+        borderLeftColor: colors[gas],
+        paddingLeft: SPACE.x2,
+        gap: 2,
+      }}
+    >
       <Small>{label}</Small>
       <Figure value={shown.figures} unit={shown.unit} size="title" isStrong />
     </View>
@@ -53,7 +82,7 @@ function StandardTests({ tests, unitSystem }: { tests: WallInTest[]; unitSystem:
 }
 
 /** A rate below what laboratories can measure says so, with its figure behind. */
-export function shownRate(test: WallInTest, unitSystem: DisplayUnitSystem): string {
+function shownRate(test: WallInTest, unitSystem: DisplayUnitSystem): string {
   const rate =
     test.test.gas === 'oxygen'
       ? formatQuantity(test.rate_cm3_STP_per_m2_day ?? NaN, 'oxygen_rate_cm3_STP_per_m2_day', { unitSystem })

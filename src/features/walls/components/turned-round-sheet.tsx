@@ -18,10 +18,16 @@ const HUMIDITIES = ['relative_humidity_outside', 'relative_humidity_inside'] as 
 /** What turning the wall round would do, between two sides that differ: a moist shop and a dry food at first. */
 export function TurnedRound({ layers, temperature_C }: TurnedRoundProps) {
   const unitSystem = useUnitSystem();
-  const [humidities, setHumidities] = useState({ relative_humidity_outside: '75', relative_humidity_inside: '30' });
+  const [humidities, setHumidities] = useState({
+    relative_humidity_outside: '75',
+    relative_humidity_inside: '30',
+  });
   const sides = sidesFromText(
     {
-      ...sidesAsText({ temperature_C, relative_humidity_outside: 0, relative_humidity_inside: 0 }, unitSystem),
+      ...sidesAsText(
+        { temperature_C, relative_humidity_outside: 0, relative_humidity_inside: 0 },
+        unitSystem,
+      ),
       ...humidities,
     },
     unitSystem,
@@ -54,7 +60,11 @@ export function TurnedRound({ layers, temperature_C }: TurnedRoundProps) {
         })}
       </View>
       <View role="status" aria-live="polite">
-        {words === null ? <Small>The comparison comes as soon as both humidities fit.</Small> : <Body>{words}</Body>}
+        {words === null ? (
+          <Small>The comparison comes as soon as both humidities fit.</Small>
+        ) : (
+          <Body>{words}</Body>
+        )}
       </View>
     </Sheet>
   );

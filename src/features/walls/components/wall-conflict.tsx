@@ -20,9 +20,12 @@ export function WallConflict({ mine, theirs, book, isBusy, ...choices }: WallCon
   const unitSystem = useUnitSystem();
   const layerWords = (layer: LaminateSpec['layers'][number] | undefined) => {
     if (layer === undefined) return '–';
-    const name = book.revisionOf(layer)?.spec.name ?? book.materials.find((each) => each.id === layer.material_id)?.revision.spec.name;
+    const name =
+      book.revisionOf(layer)?.spec.name ??
+      book.materials.find((each) => each.id === layer.material_id)?.revision.spec.name;
     const gauge = Number.isFinite(layer.thickness_um)
-      ? formatQuantity(layer.thickness_um, 'thickness_um', { unitSystem, isExact: unitSystem === 'metric' }).text
+      ? formatQuantity(layer.thickness_um, 'thickness_um', { unitSystem, isExact: unitSystem === 'metric' })
+          .text
       : 'no gauge yet';
     return `${name ?? 'Material'}, ${gauge}`;
   };
@@ -35,9 +38,16 @@ export function WallConflict({ mine, theirs, book, isBusy, ...choices }: WallCon
     theirs: layerWords(spec.layers[index]),
   }));
   return (
-    <ConflictNotice what="This wall" onKeepMine={choices.onKeepMine} onTakeTheirs={choices.onTakeTheirs} isBusy={isBusy}>
+    <ConflictNotice
+      what="This wall"
+      onKeepMine={choices.onKeepMine}
+      onTakeTheirs={choices.onTakeTheirs}
+      isBusy={isBusy}
+    >
       <Stack gap="x2">
-        {mine.name === spec.name ? null : <Small tone="ink">{`Mine is called “${mine.name}”, theirs “${spec.name}”.`}</Small>}
+        {mine.name === spec.name ? null : (
+          <Small tone="ink">{`Mine is called “${mine.name}”, theirs “${spec.name}”.`}</Small>
+        )}
         <DataTable
           caption={`Layers from the outside: mine and revision ${theirs.revision.number}`}
           columns={[

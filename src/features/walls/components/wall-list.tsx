@@ -44,7 +44,10 @@ export function WallList({ walls, materials, currentId }: WallListProps) {
               detail={
                 <View style={{ gap: SPACE.x1, paddingTop: 2 }}>
                   {drawn.length === 0 ? null : <MiniSection layers={drawn} width={160} />}
-                  <Small>{`${count}, ${totalGauge(layers.map((layer) => layer.thickness_um), unitSystem)}`}</Small>
+                  <Small>{`${count}, ${totalGauge(
+                    layers.map((layer) => layer.thickness_um),
+                    unitSystem,
+                  )}`}</Small>
                 </View>
               }
             />

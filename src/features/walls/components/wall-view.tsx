@@ -37,7 +37,8 @@ export function WallView({ name, layers, preview, sides, onSidesChange }: WallVi
       </Sheet>
     );
   }
-  const selected = selectedIndex !== undefined && selectedIndex < (layers?.length ?? 0) ? selectedIndex : undefined;
+  const selected =
+    selectedIndex !== undefined && selectedIndex < (layers?.length ?? 0) ? selectedIndex : undefined;
   return (
     <Stack gap="x4">
       <Sheet title="The wall" subtitle="Preview, worked out on this device as you change it.">
@@ -62,8 +63,15 @@ export function WallView({ name, layers, preview, sides, onSidesChange }: WallVi
       {layers === null || preview === null ? null : (
         <>
           <Warnings layers={layers} state={preview.chosen} unitSystem={unitSystem} />
-          <Sheet title="Who holds what" subtitle="Share of the resistance to each gas, under the conditions above.">
-            <ShareBars rows={shareRows(layers, preview.chosen)} selectedIndex={selected} onSelect={setSelectedIndex} />
+          <Sheet
+            title="Who holds what"
+            subtitle="Share of the resistance to each gas, under the conditions above."
+          >
+            <ShareBars
+              rows={shareRows(layers, preview.chosen)}
+              selectedIndex={selected}
+              onSelect={setSelectedIndex}
+            />
           </Sheet>
           <Sheet title="Through the wall">
             <Stairs name={name} layers={layers} state={preview.chosen} selectedIndex={selected} />
@@ -80,8 +88,20 @@ function sectionSentence(layers: BuiltLayer[]): string {
   return `From outside air to headspace: ${words}.`;
 }
 
-function Warnings({ layers, state, unitSystem }: { layers: BuiltLayer[]; state: WallState; unitSystem: DisplayUnitSystem }) {
-  const warnings = wallWarnings(layers.map((layer) => layer.description), state, unitSystem);
+function Warnings({
+  layers,
+  state,
+  unitSystem,
+}: {
+  layers: BuiltLayer[];
+  state: WallState;
+  unitSystem: DisplayUnitSystem;
+}) {
+  const warnings = wallWarnings(
+    layers.map((layer) => layer.description),
+    state,
+    unitSystem,
+  );
   if (warnings.length === 0) return null;
   return (
     <Notice kind="caution" title="This answer leans on more than was measured">
@@ -120,7 +140,8 @@ interface StairsProps {
 function Stairs({ name, layers, state, selectedIndex }: StairsProps) {
   const unitSystem = useUnitSystem();
   const pressure = (pa: number) => formatQuantity(pa, 'pressure_Pa', { unitSystem });
-  const humidity = (fraction: number) => formatQuantity(fraction, 'fraction_as_percent', { unitSystem, isExact: true }).text;
+  const humidity = (fraction: number) =>
+    formatQuantity(fraction, 'fraction_as_percent', { unitSystem, isExact: true }).text;
   const oxygen = state.oxygen.interface_pressure_Pa;
   const water = state.water.interface_pressure_Pa;
   const { unit } = pressure(1000);
@@ -128,7 +149,11 @@ function Stairs({ name, layers, state, selectedIndex }: StairsProps) {
     outsideFigures: pressure(pressures[0] ?? 0).figures,
     insideFigures: pressure(pressures.at(-1) ?? 0).figures,
   });
-  const faceNames = ['outside face', ...layers.slice(1).map(({ drawn }, index) => `${layers[index]?.drawn.name ?? ''} to ${drawn.name}`), 'inside face'];
+  const faceNames = [
+    'outside face',
+    ...layers.slice(1).map(({ drawn }, index) => `${layers[index]?.drawn.name ?? ''} to ${drawn.name}`),
+    'inside face',
+  ];
   return (
     <ChartWithTable
       table={{

@@ -1,1 +1,1 @@
-export { EditStudyScreen as default } from '../../../../../src/features/studies/study-form-screen';
+export { EditStudyScreen as default } from '../../../../../src/features/workbench/lazy-screens';

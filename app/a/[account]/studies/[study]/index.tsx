@@ -1,1 +1,1 @@
-export { StudyScreen as default } from '../../../../../src/features/studies/study-screen';
+export { StudyScreen as default } from '../../../../../src/features/workbench/lazy-screens';

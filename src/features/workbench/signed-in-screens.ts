@@ -1,0 +1,27 @@
+/** One chunk of the web build: see lazy-screens.tsx. */
+export { TeamScreen } from '../landing/team-screen';
+export { ReportsScreen } from '../landing/reports-screen';
+export { RequestsScreen } from '../landing/requests-screen';
+export { AccountScreen } from '../account/account-screen';
+export { FoodScreen } from '../foods/food-screen';
+export { FoodsScreen } from '../foods/foods-screen';
+export { NewFoodScreen } from '../foods/food-screen';
+export { AccountRedirect } from '../shell/account-redirect';
+export { MaterialScreen } from '../materials/material-screen';
+export { MaterialsScreen } from '../materials/materials-screen';
+export { NewMaterialScreen } from '../materials/material-screen';
+export { MoreScreen } from '../shell/more-screen';
+export { PackScreen } from '../packs/pack-screen';
+export { PacksScreen } from '../packs/packs-screen';
+export { NewPackScreen } from '../packs/pack-screen';
+export { RouteScreen } from '../routes/route-screen';
+export { RoutesScreen } from '../routes/routes-screen';
+export { NewRouteScreen } from '../routes/route-screen';
+export { EditStudyScreen } from '../studies/study-form-screen';
+export { StudyScreen } from '../studies/study-screen';
+export { StudiesListScreen } from '../studies/studies-list-screen';
+export { NewStudyScreen } from '../studies/study-form-screen';
+export { WallScreen } from '../walls/wall-screen';
+export { WallsScreen } from '../walls/walls-screen';
+export { NewWallScreen } from '../walls/wall-screen';
+export { GalleryScreen } from '../gallery/gallery-screen';
