@@ -110,7 +110,7 @@ describe.each(Object.keys(DEVICES) as Device[])('editing on %s', (device) => {
       const gauge = outerGauge(visit);
       await gauge.fill(bad);
       await saveWallRevision(visit);
-      await expect.poll(() => gauge.getAttribute('aria-invalid'), `“${bad}”`).toBe('true');
+      await expect.poll(() => gauge.getAttribute('aria-invalid'), { message: `“${bad}”` }).toBe('true');
       const description = await gauge.getAttribute('aria-describedby');
       const message = await page.locator(`[id="${description}"]`).innerText();
       expect(message, `“${bad}”`).toMatch(/gauge/i);

@@ -135,7 +135,8 @@ async function ask(visit: JourneyPage, judge: Judge): Promise<void> {
   expect(await field(page, 'Target').inputValue()).toBe('120');
   const chosen = { Food: 'Dry biscuits', Pack: 'Pouch 160 × 230', Route: 'Sea, then shop', Wall: WALL };
   for (const [label, name] of Object.entries(chosen)) {
-    await expect.poll(() => field(page, label).locator('option:checked').innerText(), label).toBe(name);
+    const shown = () => field(page, label).locator('option:checked').innerText();
+    await expect.poll(shown, { message: label }).toBe(name);
   }
   await judge('12-study-form');
   await press(page.getByRole('button', { name: 'Compute and keep' }));

@@ -78,7 +78,7 @@ export function WallBuilder({ opened, book, returnTo, createdMaterialId }: WallB
     if (saved === null) return;
     draft.clear();
     if (saved.id === opened?.id) {
-      setSaid(`Saved as revision ${saved.revision.number}.`);
+      setSaid(`Saved. Now at revision ${saved.revision.number}.`);
       return;
     }
     const otherwise = `${account.basePath}/walls/${saved.id}`;
@@ -120,7 +120,7 @@ interface BuilderBodyProps {
   book: MaterialBook;
   saver: KeptThingSaver<LaminateSpec>;
   isRestored: boolean;
-  /** 'Saved as revision 3.' until the next change. */
+  /** 'Saved. Now at revision 3.' until the next change. */
   said: string;
   createdMaterialId: string | undefined;
   suggest: (wall: WallDraft) => string;

@@ -64,6 +64,9 @@ export function LayerRow(props: LayerRowProps) {
       }}
     >
       <View style={{ flexDirection: 'row', alignItems: 'center', gap: SPACE.x2 }}>
+        <View style={{ width: 16 }}>
+          <Small>{String(index + 1)}</Small>
+        </View>
         <MaterialButton name={name} index={index} material={material} onPress={props.onChangeMaterial} />
         <IconButton
           icon="up"
@@ -115,7 +118,7 @@ function MaterialButton({ name, index, material, onPress }: MaterialButtonProps)
   return (
     <Pressable
       role="button"
-      aria-label={`${index + 1} ${name}: change the material`}
+      aria-label={`${name}, layer ${index + 1}: change the material`}
       onPress={onPress}
       style={{
         flexDirection: 'row',
@@ -127,9 +130,6 @@ function MaterialButton({ name, index, material, onPress }: MaterialButtonProps)
         minHeight: ROW_MIN_PX,
       }}
     >
-      <View style={{ width: 16 }}>
-        <Small>{String(index + 1)}</Small>
-      </View>
       {material === undefined ? null : (
         <HatchSwatch
           layer={{
