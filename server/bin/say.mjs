@@ -1,3 +1,7 @@
+// A reader that went away (a closed terminal, `npm start | head`) must not end a script before it has stopped what it
+// started: without these listeners the next line written would throw.
+for (const stream of [process.stdout, process.stderr]) stream.on('error', () => undefined);
+
 /** One calm line on standard output. @param {string} line */
 export function say(line) {
   process.stdout.write(`${line}\n`);
