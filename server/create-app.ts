@@ -33,6 +33,7 @@ export interface AppDeps {
   allowedOrigins: readonly string[];
   webDir: string;
   isCheckingAnswers: boolean;
+  trustedProxies?: number;
 }
 
 /** Every route there is. Express, the OpenAPI document and the access suite all read this one table. */
@@ -55,6 +56,7 @@ export function createApp(deps: AppDeps): Express {
   const app = express();
   app.disable('x-powered-by');
   app.set('etag', false);
+  app.set('trust proxy', deps.trustedProxies ?? 0);
   app.use(logRequests(deps.logger));
   app.use(securityHeaders({ isSecure: deps.isSecure }));
   for (const route of routeTable(deps)) serveRoute(app, route, deps);

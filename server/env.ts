@@ -28,6 +28,8 @@ export interface Env {
   /** Folder of the web build, from the project's folder or absolute. */
   webDir: string;
   workerThreads: number;
+  /** How many proxies of our own stand before the server; 0: the network address is the peer's. */
+  trustedProxies: number;
 }
 
 /** All keys with what they are for, as .env.example prints them. `default` is what an absent key means. */
@@ -60,6 +62,10 @@ export const ENV_KEYS = {
   LOG_LEVEL: { purpose: 'fatal, error, warn, info, debug, trace or silent', default: 'info' },
   WEB_DIR: { purpose: 'the folder of the web build', default: 'dist' },
   WORKER_THREADS: { purpose: 'threads for engine runs beyond 50 ms, 1 to 64', default: '2' },
+  TRUSTED_PROXIES: {
+    purpose: 'proxies of your own before the server, whose X-Forwarded-For is believed; 0 for none',
+    default: '0',
+  },
 } as const satisfies Record<string, { purpose: string; default: string }>;
 
 export type EnvKey = keyof typeof ENV_KEYS;
@@ -116,6 +122,7 @@ export function readEnv(source: Source = process.env): Env {
     logLevel: oneOf('LOG_LEVEL', LOG_LEVELS),
     webDir: text('WEB_DIR'),
     workerThreads: wholeNumber('WORKER_THREADS', 1, 64),
+    trustedProxies: wholeNumber('TRUSTED_PROXIES', 0, 10),
   };
   if (env.databaseUrl === '')
     faults.push('DATABASE_URL: give the address of the database, or use npm start.');

@@ -5,9 +5,11 @@ import { pino, type Logger } from 'pino';
 import { createApp } from './create-app';
 import { openDatabase } from './db/client';
 import { purgeExpired } from './db/purge-expired';
+import { refuseDemoData } from './db/refuse-demo-data';
 import { demoPeople } from './db/seed/demo-people';
 import { readEnv, type Env } from './env';
 import { startMailSink, type MailSink } from './fakes/mail-sink';
+import { logError } from './http/log-error';
 import { originsOf } from './http/origin';
 import { openSessions } from './http/sessions';
 import { bossJobs, type BossJobs } from './jobs/boss-jobs';
@@ -23,9 +25,10 @@ const JOBS_RETRY_MS = 1_000;
 async function main() {
   const env = readEnv();
   const version = readVersion();
-  const logger = pino({ level: env.logLevel });
+  const logger = pino({ level: env.logLevel, serializers: { err: logError } });
   const isSecure = env.publicUrl.startsWith('https:');
   const { db, sql, close: closeDatabase } = openDatabase(env.databaseUrl);
+  if (env.mode === 'live') await refuseDemoData(db);
   const sessions = openSessions({ db, isSecure });
   const sink = env.mode === 'demo' && env.smtpUrl === undefined ? await startMailSink() : null;
   const mail = smtpMail({ smtpUrl: smtpUrlOf(env, sink), from: env.mailFrom });
@@ -43,6 +46,7 @@ async function main() {
     allowedOrigins: originsOf(env.publicUrl),
     webDir: path.resolve(env.webDir),
     isCheckingAnswers: false,
+    trustedProxies: env.trustedProxies,
   });
 
   const server = createServer(app);

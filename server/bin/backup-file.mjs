@@ -9,7 +9,7 @@ import {
 } from './cluster.mjs';
 import { adminEnv, ensureRoles } from './databases.mjs';
 import { BACKUP_FOLDER, DATA_FOLDER, RUN_FOLDER } from './paths.mjs';
-import { findRecordedProcess } from './process-record.mjs';
+import { findRecordedProcess, forgetProcess, recordProcess } from './process-record.mjs';
 import { runProgram } from './run-program.mjs';
 import { Remedy } from './say.mjs';
 
@@ -63,16 +63,25 @@ export function requireStopped() {
  */
 export async function withCluster(work) {
   const cluster = await prepareCluster({ home: DATA_FOLDER, isDurable: true });
-  if (findRecordedProcess(START_RECORD) && findRecordedProcess(clusterRecord(cluster))) return work(cluster);
+  const other = findRecordedProcess(START_RECORD);
+  if (other && findRecordedProcess(clusterRecord(cluster))) return work(cluster);
+  if (other) throw new Remedy(`Process ${other.pid} works on these data just now. Wait until it is done.`);
+  // The same record that npm start writes: neither it nor another script may take the cluster away meanwhile.
+  recordProcess(START_RECORD, process.pid);
   await stopLeftoverCluster(cluster);
   const child = await launchCluster(cluster);
-  const stop = () => void stopCluster(cluster, child).then(() => process.exit(130));
+  const stop = () =>
+    void stopCluster(cluster, child).then(() => {
+      forgetProcess(START_RECORD);
+      process.exit(130);
+    });
   process.once('SIGINT', stop).once('SIGTERM', stop);
   try {
     await ensureRoles(cluster);
     await work(cluster);
   } finally {
     await stopCluster(cluster, child);
+    forgetProcess(START_RECORD);
     process.off('SIGINT', stop).off('SIGTERM', stop);
   }
 }

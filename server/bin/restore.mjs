@@ -17,6 +17,8 @@ import { Remedy, runScript, say } from './say.mjs';
 
 /** Restored here first, so that a broken file leaves the data as they are. */
 const ARRIVING = `${DATABASE}_arriving`;
+/** The data from before keep existing until the new ones stand in their place. */
+const BEFORE = `${DATABASE}_before`;
 
 await runScript(async () => {
   const file = process.argv[2];
@@ -36,9 +38,11 @@ await runScript(async () => {
     }
     if (await hasDatabase(cluster, DATABASE)) {
       say(`The data from before are in ${await dumpDatabase(cluster, DATABASE)}`);
-      await dropDatabase(cluster, DATABASE);
+      await dropDatabase(cluster, BEFORE);
+      await runSql(cluster, 'postgres', `ALTER DATABASE ${DATABASE} RENAME TO ${BEFORE}`);
     }
     await runSql(cluster, 'postgres', `ALTER DATABASE ${ARRIVING} RENAME TO ${DATABASE}`);
+    await dropDatabase(cluster, BEFORE);
     say(`Restored ${file}. Go on with: npm start`);
   });
 });

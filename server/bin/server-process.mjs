@@ -11,6 +11,13 @@ import { cacheEnv, signalGroup } from './run-program.mjs';
 
 export const SERVER_RECORD = path.join(RUN_FOLDER, 'server.json');
 const LOG = path.join(LOG_FOLDER, 'server.log');
+const host = process.env.HOST ?? '127.0.0.1';
+/** Where the server can be asked: the address it listens on, or loopback where it listens on all. */
+const HEALTH_HOST = ['0.0.0.0', '::', ''].includes(host)
+  ? '127.0.0.1'
+  : host.includes(':')
+    ? `[${host}]`
+    : host;
 
 /**
  * Starts the server in a process group of its own; its log goes to a file.
@@ -19,7 +26,7 @@ const LOG = path.join(LOG_FOLDER, 'server.log');
  */
 export function launchServer({ env, isWatching }) {
   mkdirSync(LOG_FOLDER, { recursive: true });
-  const log = openSync(LOG, 'a');
+  const log = openSync(LOG, 'a', 0o600);
   const watching = [inProject('node_modules', 'tsx', 'dist', 'cli.mjs'), 'watch', '--clear-screen=false'];
   try {
     const child = spawn(
@@ -65,7 +72,7 @@ export async function waitForHealth(getPort, { patienceMs, isOver, isOurs = () =
 /** @param {number} port */
 async function isHealthy(port) {
   try {
-    const response = await fetch(`http://127.0.0.1:${port}/api/health`, {
+    const response = await fetch(`http://${HEALTH_HOST}:${port}/api/health`, {
       signal: AbortSignal.timeout(2_000),
     });
     const health = await response.json();

@@ -21,12 +21,15 @@ export interface ServeOptions {
 }
 
 const MOST_BODY_BYTES = 1_000_000;
+/** What somebody without a session may send: an address, a password, a token. */
+const MOST_PUBLIC_BODY_BYTES = 10_000;
 /** Nobody waits longer; a database that is silent this long is said to be. */
 const DEADLINE_MS = 15_000;
 const UUID = /^[0-9a-f]{8}-[0-9a-f]{4}-[0-9a-f]{4}-[0-9a-f]{4}-[0-9a-f]{12}$/;
 const LONGEST_KEY = 200;
 
 const parseJson = express.json({ limit: MOST_BODY_BYTES, strict: false });
+const parsePublicJson = express.json({ limit: MOST_PUBLIC_BODY_BYTES, strict: false });
 
 /** Registers one route: origin, session, access, then body and preconditions, then the handler. */
 export function serveRoute(router: Router, route: RouteDefinition, options: ServeOptions): void {
@@ -42,18 +45,18 @@ interface Exchange {
 }
 
 async function answerRequest(route: RouteDefinition, options: ServeOptions, exchange: Exchange) {
-  const { request, response } = exchange;
+  const { request } = exchange;
   const isWrite = route.method !== 'get';
   if (isWrite) checkOrigin(request, options.allowedOrigins);
   const user = route.access.kind === 'public' ? null : await requireUser(options.sessions, exchange);
   const params = pathParams(request);
   const actor = await authorise(route, options.db, { params, user });
-  if (isWrite) await readBody(request, response);
+  if (isWrite) await readBody(exchange, user === null ? parsePublicJson : parseJson);
   const context: FullContext = {
     body: route.requestSchema ? validateBody(route.requestSchema, request.body) : undefined,
     query: route.querySchema ? validateQuery(route.querySchema, request.query) : {},
     params,
-    networkAddress: request.socket.remoteAddress ?? '',
+    networkAddress: request.ip ?? '',
     user,
     actor,
     ifMatch: route.wants === 'if-match' ? readIfMatch(request) : '',
@@ -93,9 +96,9 @@ function pathParams(request: Request): Record<string, string> {
   return Object.fromEntries(Object.entries(request.params).map(([name, value]) => [name, String(value)]));
 }
 
-function readBody(request: Request, response: Response): Promise<void> {
+function readBody({ request, response }: Exchange, parse: RequestHandler): Promise<void> {
   return new Promise((resolve, reject) => {
-    parseJson(request, response, (error?: unknown) => {
+    void parse(request, response, (error?: unknown) => {
       if (error === undefined || error === null) resolve();
       else reject(error instanceof Error ? error : new Error(String(error)));
     });
@@ -161,7 +164,7 @@ async function withinDeadline(work: Promise<void>): Promise<void> {
       reject(
         new AppError(
           'database_silent',
-          'The database does not answer. Nothing was lost; try again in a moment.',
+          'No answer within 15 s: the database is silent or the work is long. It may still be finished; look at the present state before you send it again.',
         ),
       );
     }, DEADLINE_MS);

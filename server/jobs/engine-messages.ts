@@ -1,11 +1,11 @@
 import type { EvaluationAnswer, EvaluationDescription } from '../../shared/engine';
 
+/** One at a time per thread, so a reply needs no number. */
 export interface EngineTask {
-  taskId: number;
   description: EvaluationDescription;
 }
 
 export type EngineReply =
-  | { taskId: number; ending: 'answered'; answer: EvaluationAnswer }
-  | { taskId: number; ending: 'refused'; path: string; value: unknown; message: string }
-  | { taskId: number; ending: 'failed'; message: string };
+  | { ending: 'answered'; answer: EvaluationAnswer }
+  | { ending: 'refused'; path: string; value: unknown; message: string }
+  | { ending: 'failed'; message: string };

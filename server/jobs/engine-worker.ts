@@ -3,19 +3,18 @@ import { evaluate, InputError } from '../../shared/engine';
 import type { EngineReply, EngineTask } from './engine-messages';
 
 /** Runs in a worker thread: descriptions in, answers out, one at a time. */
-parentPort?.on('message', ({ taskId, description }: EngineTask) => {
-  parentPort?.postMessage(reply(taskId, description));
+parentPort?.on('message', ({ description }: EngineTask) => {
+  parentPort?.postMessage(reply(description));
 });
 
-function reply(taskId: number, description: EngineTask['description']): EngineReply {
+function reply(description: EngineTask['description']): EngineReply {
   try {
-    return { taskId, ending: 'answered', answer: evaluate(description) };
+    return { ending: 'answered', answer: evaluate(description) };
   } catch (error) {
     if (error instanceof InputError) {
-      return { taskId, ending: 'refused', path: error.path, value: error.value, message: error.message };
+      return { ending: 'refused', path: error.path, value: error.value, message: error.message };
     }
     return {
-      taskId,
       ending: 'failed',
       message: error instanceof Error ? (error.stack ?? error.message) : String(error),
     };

@@ -2,6 +2,7 @@ import { createRequire } from 'node:module';
 import { fileURLToPath } from 'node:url';
 import { Worker } from 'node:worker_threads';
 import { InputError, type EvaluationAnswer, type EvaluationDescription } from '../../shared/engine';
+import { AppError } from '../http/app-error';
 import type { EngineReply, EngineTask } from './engine-messages';
 
 /** The engine, in a thread beside the one that answers requests. */
@@ -15,8 +16,18 @@ export interface EngineWorkers extends EnginePort {
   stop: () => Promise<void>;
 }
 
-/** Thrown where a computation takes longer than anybody waits. */
-class EngineTimeoutError extends Error {}
+function tookTooLong() {
+  return new AppError(
+    'computation_too_long',
+    'This computation takes longer than 8 s. Use fewer layers with humidity curves, fewer points on a curve, fewer legs or a shorter horizon.',
+  );
+}
+
+function tooManyWait() {
+  return new AppError('too_many_requests', 'Too many computations are waiting. Try again in a moment.', {
+    retryAfterS: 10,
+  });
+}
 
 interface Task {
   description: EvaluationDescription;
@@ -34,7 +45,9 @@ const WORKER_FILE = fileURLToPath(new URL('./engine-worker.ts', import.meta.url)
 const TSX = createRequire(import.meta.url).resolve('tsx/cjs');
 /** A thread does not inherit what makes the main one read TypeScript: it is set up first. */
 const WORKER_START = `require(${JSON.stringify(TSX)}); require(${JSON.stringify(WORKER_FILE)});`;
-const TASK_TIMEOUT_MS = 20_000;
+/** Below the deadline of a request, so that its ending can still be told. */
+const TASK_TIMEOUT_MS = 8_000;
+const MOST_WAITING = 200;
 
 /** A pool of threads that run TypeScript through tsx. A thread that hangs or dies is replaced. */
 export function engineWorkers({ threads }: { threads: number }): EngineWorkers {
@@ -80,12 +93,9 @@ export function engineWorkers({ threads }: { threads: number }): EngineWorkers {
       const task = free && waiting.shift();
       if (!free || !task) return;
       free.task = task;
-      free.timer = setTimeout(
-        () => closeLane(free, new EngineTimeoutError('The computation took too long.')),
-        TASK_TIMEOUT_MS,
-      );
+      free.timer = setTimeout(() => closeLane(free, tookTooLong()), TASK_TIMEOUT_MS);
       free.worker.ref();
-      free.worker.postMessage({ taskId: 0, description: task.description } satisfies EngineTask);
+      free.worker.postMessage({ description: task.description } satisfies EngineTask);
     }
   }
 
@@ -94,6 +104,10 @@ export function engineWorkers({ threads }: { threads: number }): EngineWorkers {
       new Promise((resolve, reject) => {
         if (isStopped) {
           reject(new Error('The engine is stopped.'));
+          return;
+        }
+        if (waiting.length >= MOST_WAITING) {
+          reject(tooManyWait());
           return;
         }
         waiting.push({ description, resolve, reject });

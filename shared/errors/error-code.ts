@@ -8,6 +8,7 @@ export const STATUS_BY_CODE = {
   idempotency_key_reused: 409,
   edited_meanwhile: 412,
   file_too_large: 413,
+  computation_too_long: 422,
   precondition_missing: 428,
   too_many_requests: 429,
   internal: 500,

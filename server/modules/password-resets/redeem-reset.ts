@@ -12,18 +12,20 @@ export async function redeemReset(
   { db }: { db: Database },
   { token, password }: { token: string; password: string },
 ): Promise<Answer> {
+  const isValid = and(
+    eq(passwordResetTokens.tokenSha256, sha256Hex(token)),
+    gt(passwordResetTokens.expiresAt, new Date()),
+  );
+  // Hashing is dear on purpose: nobody gets it for a token that does not exist.
+  const [found] = await db
+    .select({ userId: passwordResetTokens.userId })
+    .from(passwordResetTokens)
+    .where(isValid);
+  if (!found) throw linkIsWorthless();
   const passwordHash = await hashPassword(password);
   await db.transaction(async (tx) => {
-    const isValid = and(
-      eq(passwordResetTokens.tokenSha256, sha256Hex(token)),
-      gt(passwordResetTokens.expiresAt, new Date()),
-    );
     const [redeemed] = await tx.delete(passwordResetTokens).where(isValid).returning();
-    if (!redeemed) {
-      throw inputInvalid([
-        { path: 'token', message: 'This link was used or is older than an hour. Ask for a new one.' },
-      ]);
-    }
+    if (!redeemed) throw linkIsWorthless();
     const { userId } = redeemed;
     await tx.update(users).set({ passwordHash }).where(eq(users.id, userId));
     await tx.delete(sessions).where(eq(sessions.userId, userId));
@@ -37,4 +39,10 @@ export async function redeemReset(
     });
   });
   return { status: 204 };
+}
+
+function linkIsWorthless() {
+  return inputInvalid([
+    { path: 'token', message: 'This link was used or is older than an hour. Ask for a new one.' },
+  ]);
 }

@@ -50,7 +50,7 @@ export function AccountFrame({ children }: { children: ReactNode }) {
     );
   }
   return (
-    <AccountProvider account={account}>
+    <AccountProvider key={account.id} account={account}>
       <Shell pathname={pathname}>{children}</Shell>
     </AccountProvider>
   );
