@@ -1,14 +1,19 @@
-import { and, desc, eq, inArray, lt } from 'drizzle-orm';
-import type { KeptThing, Page, Revision } from '../../shared/contract/kept-things';
+import { and, asc, desc, eq, ilike, inArray, isNotNull, isNull, lt, sql, type SQL } from 'drizzle-orm';
+import type { ArchivedFilter } from '../../shared/contract/fields';
+import type { KeptThing, NamedRevision, Page, Revision } from '../../shared/contract/kept-things';
 import { PAGE_SIZE } from '../../shared/contract/rules';
 import type { Queryable, Transaction } from './client';
 import { newId } from './new-id';
-import type { RevisionTable, ThingTable } from './schema';
+import { people, type RevisionTable, type ThingTable } from './schema';
 
 /** The two tables of one collection. */
 export interface ThingTables<Spec> {
   things: ThingTable;
   revisions: RevisionTable<Spec>;
+}
+
+interface Named {
+  name: string;
 }
 
 interface NewRevision<Spec> {
@@ -19,7 +24,7 @@ interface NewRevision<Spec> {
   createdBy: string | null;
 }
 
-export async function insertThing<Spec>(
+export async function insertThing<Spec extends Named>(
   tx: Transaction,
   tables: ThingTables<Spec>,
   { accountId, spec, note, createdBy }: NewRevision<Spec>,
@@ -29,7 +34,7 @@ export async function insertThing<Spec>(
   // The deferred foreign key is checked at commit, when both rows are there.
   const [thing] = await tx
     .insert(tables.things)
-    .values({ id, accountId, currentRevisionId: revisionId })
+    .values({ id, accountId, currentRevisionId: revisionId, name: spec.name })
     .returning();
   const revision = await insertRow(tx, tables, {
     id: revisionId,
@@ -40,11 +45,11 @@ export async function insertThing<Spec>(
     note,
     createdBy,
   });
-  return { id, created_at: (thing?.createdAt ?? new Date()).toISOString(), revision };
+  return { id, created_at: (thing?.createdAt ?? new Date()).toISOString(), archived_at: null, revision };
 }
 
 /** Adds a revision and makes it the current one. The thing must be locked (lockThing). */
-export async function insertRevision<Spec>(
+export async function insertRevision<Spec extends Named>(
   tx: Transaction,
   tables: ThingTables<Spec>,
   { accountId, spec, note, createdBy, base }: NewRevision<Spec> & { base: KeptThing<Spec> },
@@ -60,7 +65,10 @@ export async function insertRevision<Spec>(
     note,
     createdBy,
   });
-  await tx.update(tables.things).set({ currentRevisionId: id }).where(eq(tables.things.id, base.id));
+  await tx
+    .update(tables.things)
+    .set({ currentRevisionId: id, name: spec.name })
+    .where(eq(tables.things.id, base.id));
   return { ...base, revision };
 }
 
@@ -97,23 +105,99 @@ export async function findThings<Spec>(
   return rows.map((row) => asKeptThing<Spec>(row));
 }
 
-/** Newest first, after the last id seen. */
+/** Takes the thing out of the lists or puts it back. The thing must be locked (lockThing). */
+export async function setArchived<Spec>(
+  tx: Transaction,
+  { things }: ThingTables<Spec>,
+  { thing, isArchived }: { thing: KeptThing<Spec>; isArchived: boolean },
+): Promise<KeptThing<Spec>> {
+  const archivedAt = isArchived ? new Date() : null;
+  await tx.update(things).set({ archivedAt }).where(eq(things.id, thing.id));
+  return { ...thing, archived_at: archivedAt?.toISOString() ?? null };
+}
+
+/** Current names by id, of several collections in one question; only the account's. */
+export async function findNames(
+  db: Queryable,
+  accountId: string,
+  wanted: readonly { things: ThingTable; ids: readonly string[] }[],
+): Promise<Map<string, string>> {
+  const questions = wanted
+    .filter(({ ids }) => ids.length > 0)
+    .map(
+      ({ things, ids }) =>
+        sql`SELECT ${things.id} AS id, ${things.name} AS name FROM ${things}
+          WHERE ${and(eq(things.accountId, accountId), inArray(things.id, [...new Set(ids)]))}`,
+    );
+  if (questions.length === 0) return new Map();
+  const rows = await db.execute<{ id: string; name: string }>(sql.join(questions, sql` UNION ALL `));
+  return new Map(rows.map(({ id, name }) => [id, name]));
+}
+
+/** Those of the ids that are archived. */
+export async function findArchivedIds(
+  db: Queryable,
+  things: ThingTable,
+  ids: readonly string[],
+): Promise<Set<string>> {
+  if (ids.length === 0) return new Set();
+  const rows = await db
+    .select({ id: things.id })
+    .from(things)
+    .where(and(inArray(things.id, [...ids]), isNotNull(things.archivedAt)));
+  return new Set(rows.map(({ id }) => id));
+}
+
+export interface ListRequest {
+  accountId: string;
+  after?: string;
+  limit?: number;
+  /** Part of the name, in any case. */
+  search?: string;
+  archived?: ArchivedFilter;
+  /** A further condition on the thing or its current revision. */
+  only?: SQL;
+  /** Newest first if absent. `by` speaks of the thing's own columns, so that a page can begin after any thing. */
+  order?: { by: SQL; isRising: boolean };
+}
+
+/** A page after the last id seen, by the order's key and then by id, so that nothing comes twice or never. */
 export async function listThings<Spec>(
   db: Queryable,
   tables: ThingTables<Spec>,
-  { accountId, after, limit = PAGE_SIZE }: { accountId: string; after?: string; limit?: number },
+  { accountId, after, limit = PAGE_SIZE, search, archived = 'no', only, order }: ListRequest,
 ): Promise<Page<KeptThing<Spec>>> {
   const { things } = tables;
-  const isAfter = after === undefined ? undefined : lt(things.id, after);
+  const direction = order?.isRising === true ? asc : desc;
   const rows = await selectThings(db, tables)
-    .where(and(eq(things.accountId, accountId), isAfter))
-    .orderBy(desc(things.id))
+    .where(
+      and(
+        eq(things.accountId, accountId),
+        archived === 'only' ? isNotNull(things.archivedAt) : isNull(things.archivedAt),
+        search === undefined || search === '' ? undefined : ilike(things.name, `%${literally(search)}%`),
+        only,
+        after === undefined ? undefined : isAfter(things, { after, order }),
+      ),
+    )
+    .orderBy(...(order ? [direction(order.by)] : []), direction(things.id))
     .limit(limit + 1);
   const items = rows.slice(0, limit).map((row) => asKeptThing<Spec>(row));
   return { items, next_after: rows.length > limit ? (items.at(-1)?.id ?? null) : null };
 }
 
-/** Newest first. */
+function isAfter(things: ThingTable, { after, order }: { after: string } & Pick<ListRequest, 'order'>): SQL {
+  if (!order) return lt(things.id, after);
+  const { by, isRising } = order;
+  const last = sql`(SELECT ${by}, ${things.id} FROM ${things} WHERE ${things.id} = ${after})`;
+  return isRising ? sql`(${by}, ${things.id}) > ${last}` : sql`(${by}, ${things.id}) < ${last}`;
+}
+
+/** What stands for anything in LIKE stands here for itself. */
+function literally(text: string): string {
+  return text.replace(/[\\%_]/g, '\\$&');
+}
+
+/** Newest first, with the author's name from the erasable table. */
 export async function listRevisions<Spec>(
   db: Queryable,
   tables: ThingTables<Spec>,
@@ -123,11 +207,12 @@ export async function listRevisions<Spec>(
     after,
     limit = PAGE_SIZE,
   }: { accountId: string; id: string; after?: string; limit?: number },
-): Promise<Page<Revision<Spec>>> {
+): Promise<Page<NamedRevision<Spec>>> {
   const { revisions } = tables;
   const rows = await db
-    .select()
+    .select({ revision: revisions, authorName: people.name })
     .from(revisions)
+    .leftJoin(people, eq(people.userId, revisions.createdBy))
     .where(
       and(
         eq(revisions.accountId, accountId),
@@ -137,7 +222,10 @@ export async function listRevisions<Spec>(
     )
     .orderBy(desc(revisions.id))
     .limit(limit + 1);
-  const items = rows.slice(0, limit).map((row) => asRevision<Spec>(row));
+  const items = rows.slice(0, limit).map(({ revision, authorName }) => ({
+    ...asRevision<Spec>(revision),
+    created_by_name: authorName,
+  }));
   return { items, next_after: rows.length > limit ? (items.at(-1)?.id ?? null) : null };
 }
 
@@ -195,7 +283,12 @@ async function insertRow<Spec>(
 }
 
 function asKeptThing<Spec>({ thing, revision }: { thing: ThingRow; revision: RevisionRow }): KeptThing<Spec> {
-  return { id: thing.id, created_at: thing.createdAt.toISOString(), revision: asRevision<Spec>(revision) };
+  return {
+    id: thing.id,
+    created_at: thing.createdAt.toISOString(),
+    archived_at: thing.archivedAt?.toISOString() ?? null,
+    revision: asRevision<Spec>(revision),
+  };
 }
 
 function asRevision<Spec>(row: RevisionRow): Revision<Spec> {

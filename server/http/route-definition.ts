@@ -1,4 +1,5 @@
 import type { AnyObjectSchema, Lazy, Schema } from 'yup';
+import type { ArchivedFilter, StudySort } from '../../shared/contract/fields';
 import type { Role } from '../../shared/contract/session';
 import { notFound } from './app-error';
 
@@ -50,6 +51,12 @@ export interface PublicContext<Body> {
 export interface PageQuery {
   after?: string;
   limit?: number;
+  /** On lists of kept things. */
+  search?: string;
+  archived?: ArchivedFilter;
+  /** On the list of studies. */
+  tag?: string;
+  sort?: StudySort;
 }
 export interface SignedInContext<Body> extends PublicContext<Body> {
   user: SignedInUser;

@@ -54,7 +54,12 @@ function boundedNumber(rule: QuantityRule) {
         return isAboveMin && value <= rule.max;
       },
     })
-    .meta({ minimum: rule.min, maximum: rule.max, isMinExcluded: rule.isMinExcluded ?? false, unit: rule.unit });
+    .meta({
+      minimum: rule.min,
+      maximum: rule.max,
+      isMinExcluded: rule.isMinExcluded ?? false,
+      unit: rule.unit,
+    });
 }
 
 function formatBound(value: number, rule: QuantityRule): string {
@@ -93,6 +98,11 @@ export function idField(label: string) {
     .meta({ format: 'uuid' });
 }
 
+/** As idField, but the key may be absent. */
+export function optionalIdField(label: string) {
+  return yup.string().strict().matches(UUID, `${label}: choose one.`).optional().meta({ format: 'uuid' });
+}
+
 /** An id that may be absent: null says 'none'. */
 export function nullableIdField() {
   return yup.string().strict().matches(UUID).nullable().defined().meta({ format: 'uuid' });
@@ -100,6 +110,11 @@ export function nullableIdField() {
 
 export function timeField() {
   return yup.string().strict().required().meta({ format: 'date-time' });
+}
+
+/** A time that may not have come: null. */
+export function nullableTimeField() {
+  return yup.string().strict().nullable().defined().meta({ format: 'date-time' });
 }
 
 /** An object whose unknown keys are refused by name. */
@@ -115,6 +130,36 @@ export const pageQuerySchema = yup
   .object({
     after: yup.string().matches(UUID, 'after: give the id that the previous page ended with.').optional(),
     limit: yup.number().integer().min(1).max(200).optional(),
+  })
+  .noUnknown();
+
+export const ARCHIVED_FILTERS = ['no', 'only'] as const;
+export type ArchivedFilter = (typeof ARCHIVED_FILTERS)[number];
+
+/** What a list of kept things may be asked for besides the page. */
+const keptListFilters = {
+  /** Part of the name, in any case; '%' and '_' stand for themselves. */
+  search: yup.string().trim().max(120, 'search: at most 120 characters.').optional(),
+  /** 'no' (if absent): what is in use; 'only': what is archived. */
+  archived: yup.string().oneOf(ARCHIVED_FILTERS, 'archived: use no or only.').optional(),
+};
+
+export const keptListQuerySchema = yup.object({ ...pageQuerySchema.fields, ...keptListFilters }).noUnknown();
+
+export const STUDY_SORTS = ['newest', 'name', 'days'] as const;
+/** 'newest' if absent; 'name': from A; 'days': the longest life first. */
+export type StudySort = (typeof STUDY_SORTS)[number];
+
+export const studyListQuerySchema = yup
+  .object({
+    ...pageQuerySchema.fields,
+    ...keptListFilters,
+    /** One tag, exactly as written. */
+    tag: yup.string().max(30, 'tag: at most 30 characters.').optional(),
+    sort: yup
+      .string()
+      .oneOf(STUDY_SORTS, `sort: use ${STUDY_SORTS.join(', ')}.`)
+      .optional(),
   })
   .noUnknown();
 

@@ -41,14 +41,48 @@ export const statedValueSchema = closedObject({
   /** Oxygen: on both sides. Water: the humidity at which the curve's factor equals its mean over the test. */
   relative_humidity: optionalQuantity({ ...RULES.relativeHumidity, label: 'Humidity of the value' }),
   /** Water rates only. */
-  relative_humidity_high: optionalQuantity({ ...RULES.relativeHumidity, label: 'Humidity of the moist side' }),
+  relative_humidity_high: optionalQuantity({
+    ...RULES.relativeHumidity,
+    label: 'Humidity of the moist side',
+  }),
   relative_humidity_low: optionalQuantity({ ...RULES.relativeHumidity, label: 'Humidity of the dry side' }),
   /** Oxygen rates only: 1 for pure oxygen, 0.2095 for air. */
   oxygen_mole_fraction_dry: optionalQuantity(RULES.oxygenMoleFraction),
   activation_energy_J_per_mol: optionalQuantity(RULES.activationEnergy),
-  measured_temperature_min_C: optionalQuantity({ ...RULES.temperature, label: 'Lowest measured temperature', min: -100, max: 200 }),
-  measured_temperature_max_C: optionalQuantity({ ...RULES.temperature, label: 'Highest measured temperature', min: -100, max: 200 }),
+  measured_temperature_min_C: optionalQuantity({
+    ...RULES.temperature,
+    label: 'Lowest measured temperature',
+    min: -100,
+    max: 200,
+  }),
+  measured_temperature_max_C: optionalQuantity({
+    ...RULES.temperature,
+    label: 'Highest measured temperature',
+    min: -100,
+    max: 200,
+  }),
   humidity_curve: humidityCurveSchema.optional().default(undefined),
+});
+
+const transmissionSchema = closedObject({
+  uv_350nm: quantity({ ...RULES.lightPassed, label: 'Ultraviolet passed' }),
+  visible_550nm: quantity({ ...RULES.lightPassed, label: 'Visible light passed' }),
+});
+
+/**
+ * Fraction of light that passes: `per_um` by 1 µm of a film, `whole` by the whole layer (coatings; a print as a film).
+ * Null or absent: not known. A foil has none: light passes its pinholes alone.
+ */
+const filmLightSchema = closedObject({
+  per_um: transmissionSchema.optional().default(undefined),
+  whole: transmissionSchema.optional().default(undefined),
+}).test(
+  'one',
+  'Light: give it per µm or for the whole layer, one of the two.',
+  (light) => !light || (light.per_um === undefined) !== (light.whole === undefined),
+);
+const coatingLightSchema = closedObject({
+  whole: transmissionSchema.required('Light: give it for the whole layer.'),
 });
 
 const gasShape = {
@@ -85,22 +119,36 @@ const commonShape = {
 
 const filmMaterialSchema = closedObject({
   ...commonShape,
-  kind: yup.string().strict().oneOf(['film'] as const).required(),
+  kind: yup
+    .string()
+    .strict()
+    .oneOf(['film'] as const)
+    .required(),
   oxygen: filmMaterialGasSchema.required('Oxygen: give a permeability.'),
   water: filmMaterialGasSchema.required('Water: give a permeability.'),
+  light: filmLightSchema.nullable().optional().default(undefined),
 });
 
 const coatingMaterialSchema = closedObject({
   ...commonShape,
-  kind: yup.string().strict().oneOf(['coating'] as const).required(),
+  kind: yup
+    .string()
+    .strict()
+    .oneOf(['coating'] as const)
+    .required(),
   oxygen: coatingMaterialGasSchema.required('Oxygen: give a permeance.'),
   water: coatingMaterialGasSchema.required('Water: give a permeance.'),
   defects: defectsSchema.nullable().defined(),
+  light: coatingLightSchema.nullable().optional().default(undefined),
 });
 
 const foilMaterialSchema = closedObject({
   ...commonShape,
-  kind: yup.string().strict().oneOf(['foil'] as const).required(),
+  kind: yup
+    .string()
+    .strict()
+    .oneOf(['foil'] as const)
+    .required(),
   defects: defectsSchema.nullable().defined(),
 });
 
@@ -125,5 +173,7 @@ export type FilmMaterialSpec = yup.InferType<typeof filmMaterialSchema>;
 export type CoatingMaterialSpec = yup.InferType<typeof coatingMaterialSchema>;
 export type FoilMaterialSpec = yup.InferType<typeof foilMaterialSchema>;
 export type MaterialSpec = FilmMaterialSpec | CoatingMaterialSpec | FoilMaterialSpec;
+export type FilmLight = yup.InferType<typeof filmLightSchema>;
+export type CoatingLight = yup.InferType<typeof coatingLightSchema>;
 export type StatedValue = yup.InferType<typeof statedValueSchema>;
 export type ProvenanceEntry = yup.InferType<typeof provenanceEntrySchema>;

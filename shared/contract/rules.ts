@@ -10,10 +10,23 @@ export const RULES = {
   permeability: { label: 'Permeability', unit: 'mol·m/(m²·s·Pa)', min: 0, max: 1e-6, isMinExcluded: true },
   permeance: { label: 'Permeance', unit: 'mol/(m²·s·Pa)', min: 0, max: 1e-2, isMinExcluded: true },
   statedValue: { label: 'Value', unit: '', min: 0, max: 1e15, isMinExcluded: true },
-  activationEnergy: { label: 'Activation energy', unit: 'kJ/mol', min: -100_000, max: 200_000, shownFactor: 1000 },
+  activationEnergy: {
+    label: 'Activation energy',
+    unit: 'kJ/mol',
+    min: -100_000,
+    max: 200_000,
+    shownFactor: 1000,
+  },
   humidityFactor: { label: 'Factor', unit: '', min: 0, max: 1e9, isMinExcluded: true },
   geometricSd: { label: 'Spread (geometric SD)', unit: '', min: 1, max: 10 },
-  oxygenMoleFraction: { label: 'Oxygen in the dry gas', unit: '%', min: 0, max: 1, isMinExcluded: true, shownFactor: 0.01 },
+  oxygenMoleFraction: {
+    label: 'Oxygen in the dry gas',
+    unit: '%',
+    min: 0,
+    max: 1,
+    isMinExcluded: true,
+    shownFactor: 0.01,
+  },
   defectDensity: { label: 'Pinholes', unit: 'per m²', min: 0, max: 1e12 },
   defectDiameter: { label: 'Pinhole diameter', unit: 'µm', min: 0, max: 1000 },
   area: { label: 'Area', unit: 'm²', min: 0, max: 100, isMinExcluded: true },
@@ -41,6 +54,7 @@ export const RULES = {
   horizonDays: { label: 'Horizon', unit: 'days', min: 0, max: 36_500, isMinExcluded: true },
   totalPressure: { label: 'Total pressure', unit: 'Pa', min: 20_000, max: 1e6 },
   density: { label: 'Density', unit: 'kg/m³', min: 0, max: 25_000, isMinExcluded: true },
+  lightPassed: { label: 'Light passed', unit: '%', min: 0, max: 1, shownFactor: 0.01 },
   price: { label: 'Price', unit: '', min: 0, max: 1e6 },
 } as const satisfies Record<string, QuantityRule>;
 

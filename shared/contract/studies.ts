@@ -10,10 +10,34 @@ import { RULES } from './rules';
  * stores its result in the same transaction. Besides:
  *
  * POST  …/studies/<id>/results   run again with the newest revisions; Idempotency-Key wanted; 201 with the result
- * GET   …/studies/<id>/results   its results, newest first
+ * GET   …/studies/<id>/results   its results, newest first, each whole: ask for few (limit=2 for the old beside the new)
  * GET   …/studies/<id>/results/<result id>
  */
 export const MOST_LAMINATES_IN_STUDY = 8;
+export const MOST_TAGS = 10;
+export const LONGEST_TAG = 30;
+
+export const VERDICTS = ['open', 'chosen', 'dropped'] as const;
+export type Verdict = (typeof VERDICTS)[number];
+
+/** Why a laminate was chosen or dropped. */
+export const laminateNoteSchema = closedObject({
+  laminate_id: idField('Wall'),
+  verdict: yup
+    .string()
+    .strict()
+    .oneOf(VERDICTS, `Verdict: use ${VERDICTS.join(', ')}.`)
+    .required('Verdict: choose one.'),
+  note: noteField('Note').defined(),
+});
+export type LaminateNote = yup.InferType<typeof laminateNoteSchema>;
+
+const tagField = yup
+  .string()
+  .strict()
+  .required('Tag: enter some text.')
+  .matches(/^\S(.*\S)?$/, 'Tag: begin and end it without spaces.')
+  .max(LONGEST_TAG, `Tag: at most ${LONGEST_TAG} characters.`);
 
 export const studySpecSchema = closedObject({
   name: nameField('Name'),
@@ -29,8 +53,36 @@ export const studySpecSchema = closedObject({
     .max(MOST_LAMINATES_IN_STUDY, `Walls: at most ${MOST_LAMINATES_IN_STUDY}.`)
     .test('once', 'Walls: choose each wall once.', (ids) => new Set(ids).size === (ids ?? []).length),
   notes: noteField('Notes').defined(),
+  /** Absent: none. Editing tags, notes or verdicts computes nothing anew. */
+  tags: yup
+    .array(tagField)
+    .strict()
+    .max(MOST_TAGS, `Tags: at most ${MOST_TAGS}.`)
+    .test('once', 'Tags: each once.', (tags) => new Set(tags).size === (tags ?? []).length)
+    .optional(),
+  /** Absent: none; at most one for each laminate of the study. */
+  laminate_notes: yup
+    .array(laminateNoteSchema)
+    .strict()
+    .max(MOST_LAMINATES_IN_STUDY, 'Notes on walls: one for each wall.')
+    .test('once', 'Notes on walls: one for each wall.', (notes) => {
+      const ids = (notes ?? []).map((note) => note.laminate_id);
+      return new Set(ids).size === ids.length;
+    })
+    .optional(),
   typed: typedValuesField(),
+}).test('notes-of-study', 'Notes on walls: only on walls of this study.', (spec, context) => {
+  const stray = (spec?.laminate_notes ?? []).findIndex(
+    (note) => !spec?.laminate_ids?.includes(note.laminate_id),
+  );
+  return (
+    stray < 0 || context.createError({ path: joined(context.path, `laminate_notes[${stray}].laminate_id`) })
+  );
 });
+
+function joined(path: string | undefined, field: string): string {
+  return path ? `${path}.${field}` : field;
+}
 
 export type StudySpec = yup.InferType<typeof studySpecSchema>;
 
@@ -41,8 +93,36 @@ export interface Candidate {
   name: string;
   /** Per layer, outside first: what the drawing needs. */
   layers: CandidateLayer[];
+  /** Walls: the candidate's own first; a tray's second. */
   description: EvaluationDescription;
   answer: EvaluationAnswer;
+  make_up: MakeUp;
+}
+
+/** What one pack is made of: the film cut for it, not what leaves the mill. Numbers are null where a layer lacks data. */
+export interface MakeUp {
+  /** Of the candidate's own wall. */
+  mass_g_per_m2: number | null;
+  /**
+   * Film cut for the candidate's own wall: of a pouch 2·width·height + 2·gusset·width with its seals; of a tray the
+   * lid; a given area as it is given.
+   */
+  cut_area_m2: number;
+  /** All walls together: of a tray, lid and tray. */
+  mass_g_per_pack: number | null;
+  /** Materials without a density. */
+  mass_missing: string[];
+  price_per_pack: number | null;
+  /** ISO 4217; the account's when it was computed. */
+  currency: string;
+  /** Materials without a price, or priced by mass and without a density. */
+  price_missing: string[];
+  /** Shares of the pack's mass, 0 to 1, the largest first; empty where the mass is not known. */
+  family_shares: { family: string; share: number }[];
+  /** Fractions passed by the candidate's own wall, 0 to 1. */
+  light: { uv_350nm: number; visible_550nm: number } | null;
+  /** Materials whose light is not known. */
+  light_missing: string[];
 }
 
 export interface CandidateLayer {
@@ -50,6 +130,7 @@ export interface CandidateLayer {
   material_revision_id: string;
   material_name: string;
   material_class: string;
+  polymer_family: string;
   kind: 'film' | 'coating' | 'foil';
   thickness_um: number;
   /** True where a coefficient of the material is from memory, invented, or common practice, not read at a source. */
@@ -68,7 +149,18 @@ export interface StudyResult {
   sha256: string;
   target_days: number;
   food: { id: string; revision_id: string; name: string; cautions: string[] };
-  pack: { id: string; revision_id: string; name: string };
+  pack: {
+    id: string;
+    revision_id: string;
+    name: string;
+    /** The tray's body, where the pack is a tray: the same behind every candidate's lid. */
+    tray: {
+      laminate_id: string;
+      laminate_revision_id: string;
+      name: string;
+      layers: CandidateLayer[];
+    } | null;
+  };
   route: { id: string; revision_id: string; name: string };
   candidates: Candidate[];
 }
@@ -94,6 +186,19 @@ export interface Study extends KeptThing<StudySpec> {
   headline: StudyHeadline | null;
   /** True where something the study uses has a newer revision than its latest result pins. */
   is_outdated: boolean;
+  /** Each thing that has; empty unless is_outdated. */
+  newer: NewerThing[];
+}
+
+export const NEWER_KINDS = ['material', 'laminate', 'pack', 'food', 'route'] as const;
+
+export interface NewerThing {
+  kind: (typeof NEWER_KINDS)[number];
+  id: string;
+  /** As it is called now. */
+  name: string;
+  /** Of a material: the study's laminates that still hold the older revision; run again after revising them. */
+  laminates: { id: string; name: string }[];
 }
 
 export interface StudyWithResult extends Study {

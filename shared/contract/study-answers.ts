@@ -1,10 +1,10 @@
 import * as yup from 'yup';
 import { evaluationAnswerSchema, LIMIT_NAMES } from './evaluation-answer';
 import { evaluationRequestSchema } from './evaluations';
-import { closedObject, idField, nullableIdField, timeField } from './fields';
+import { closedObject, idField, nullableIdField, nullableTimeField, timeField } from './fields';
 import { pageSchema, revisionSchema } from './kept-things';
 import { MATERIAL_KINDS } from './materials';
-import { studySpecSchema } from './studies';
+import { NEWER_KINDS, studySpecSchema } from './studies';
 
 /** Response schemas of studies and results; their types stand in studies.ts. */
 
@@ -16,6 +16,7 @@ const candidateLayerSchema = closedObject({
   material_revision_id: idField('Material revision'),
   material_name: text(),
   material_class: text(),
+  polymer_family: text(),
   kind: yup.string().strict().oneOf(MATERIAL_KINDS).required(),
   thickness_um: yup.number().strict().required(),
   leans_on: yup
@@ -30,6 +31,26 @@ const candidateLayerSchema = closedObject({
     .required(),
 });
 
+const share = () => yup.number().strict().min(0).max(1).required();
+const amount = () => yup.number().strict().min(0).nullable().defined();
+const names = () => yup.array(text()).strict().required();
+
+export const makeUpSchema = closedObject({
+  mass_g_per_m2: amount(),
+  cut_area_m2: yup.number().strict().required(),
+  mass_g_per_pack: amount(),
+  mass_missing: names(),
+  price_per_pack: amount(),
+  currency: yup.string().strict().length(3).required(),
+  price_missing: names(),
+  family_shares: yup
+    .array(closedObject({ family: text(), share: share() }))
+    .strict()
+    .required(),
+  light: closedObject({ uv_350nm: share(), visible_550nm: share() }).nullable().defined(),
+  light_missing: names(),
+});
+
 export const candidateSchema = closedObject({
   laminate_id: idField('Laminate'),
   laminate_revision_id: idField('Laminate revision'),
@@ -37,6 +58,7 @@ export const candidateSchema = closedObject({
   layers: yup.array(candidateLayerSchema).strict().required(),
   description: evaluationRequestSchema,
   answer: evaluationAnswerSchema.required(),
+  make_up: makeUpSchema.required(),
 });
 
 const pinned = {
@@ -60,7 +82,17 @@ export const studyResultSchema = closedObject({
     .required(),
   target_days: yup.number().strict().required(),
   food: closedObject({ ...pinned, cautions: yup.array(text()).strict().required() }).required(),
-  pack: closedObject(pinned).required(),
+  pack: closedObject({
+    ...pinned,
+    tray: closedObject({
+      laminate_id: idField('Laminate'),
+      laminate_revision_id: idField('Laminate revision'),
+      name: text(),
+      layers: yup.array(candidateLayerSchema).strict().required(),
+    })
+      .nullable()
+      .defined(),
+  }).required(),
   route: closedObject(pinned).required(),
   candidates: yup.array(candidateSchema).strict().required(),
 });
@@ -79,6 +111,7 @@ const headlineSchema = closedObject({
 const studyShape = {
   id: idField('Id'),
   created_at: timeField(),
+  archived_at: nullableTimeField(),
   revision: revisionSchema(studySpecSchema).required(),
   food_name: text(),
   pack_name: text(),
@@ -86,6 +119,20 @@ const studyShape = {
   laminate_names: yup.array(text()).strict().required(),
   headline: headlineSchema.nullable().defined(),
   is_outdated: yup.boolean().strict().required(),
+  newer: yup
+    .array(
+      closedObject({
+        kind: yup.string().strict().oneOf(NEWER_KINDS).required(),
+        id: idField('Id'),
+        name: text(),
+        laminates: yup
+          .array(closedObject({ id: idField('Laminate'), name: text() }))
+          .strict()
+          .required(),
+      }),
+    )
+    .strict()
+    .required(),
 };
 
 export const studySchema = closedObject(studyShape);

@@ -12,14 +12,16 @@ import { warningsOf } from './evaluation-warnings';
 import { describePack } from './pack-conductance';
 import { standardTests } from './standard-tests';
 import { answerOf } from './storage-answer';
-import { RELATIVE_TOLERANCE, runStorage, type StorageRun } from './storage-run';
+import { runStorage, type StorageRun } from './storage-run';
 import type { StorageSystem } from './storage-system';
 import { ENGINE_VERSION } from './version';
 import { testWall } from './wall-in-test';
 import { describeWall } from './wall-profile';
 
 /** Legs of the first pass that are shown one by one. */
-export const MOST_LEGS_SHOWN = 60;
+const MOST_LEGS_SHOWN = 60;
+/** Legs that are looked at for warnings: all that a request may hold. */
+const MOST_LEGS_WATCHED = 400;
 const TEST_COUNT = { min: 0, max: 50 };
 
 /**
@@ -40,7 +42,7 @@ export function evaluate(description: EvaluationDescription): EvaluationAnswer {
         });
   const tests = description.tests ?? standardTests;
   readList(tests, 'tests', { range: TEST_COUNT, label: 'Tests' });
-  const run = runStorage(system, MOST_LEGS_SHOWN);
+  const run = runStorage(system, MOST_LEGS_WATCHED);
   const answer = answerOf(description, system, run);
   const walls = system.pack.walls.map((wall, i): WallAnswer => ({
     name: wall.name,
@@ -53,7 +55,7 @@ export function evaluate(description: EvaluationDescription): EvaluationAnswer {
     legs: wallOnLegs(system, run, i),
     tests: tests.map((test, k) => testWall(wall.layers, test, `tests[${k}]`)),
   }));
-  const pack = run.legStarts.map((start) => {
+  const pack = run.legStarts.slice(0, MOST_LEGS_SHOWN).map((start) => {
     const { pack: at, humidity } = run.conditions[start.leg];
     at.conduct(humidity, start.insideHumidity);
     return { leg: start.leg, starts_day: start.atS / DAY_S, ...describePack(at) };
@@ -75,18 +77,6 @@ export function evaluate(description: EvaluationDescription): EvaluationAnswer {
     walls,
     pack,
     warnings: warningsOf(system, run, walls),
-    solver: {
-      method:
-        run.counters.acceptedSteps > 0
-          ? 'Clenshaw–Curtis quadrature and collocation of degree 8, adaptive'
-          : 'closed form',
-      status: run.counters.isStepLimitReached ? 'step limit reached' : 'finished',
-      relative_tolerance: RELATIVE_TOLERANCE,
-      accepted_steps: run.counters.acceptedSteps,
-      rejected_steps: run.counters.rejectedSteps,
-      rate_evaluations: run.counters.rateEvaluations,
-      wall_solutions: run.wallSolutions,
-    },
   };
 }
 
@@ -101,7 +91,7 @@ function isMet(
 }
 
 function wallOnLegs(system: StorageSystem, run: StorageRun, wallIndex: number): WallOnLeg[] {
-  return run.legStarts.map((start) => {
+  return run.legStarts.slice(0, MOST_LEGS_SHOWN).map((start) => {
     const conditions = run.conditions[start.leg];
     const state = describeWall(conditions.pack.walls[wallIndex], {
       humidityOutside: conditions.humidity,

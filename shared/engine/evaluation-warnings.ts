@@ -4,9 +4,12 @@ import { LIMIT_NAMES } from './description/read-storage';
 import type { LimitName } from './description/storage-description';
 import type { GasInLayer, Layer } from './layer';
 import { isBeyondMeasured, isFarFromReference, TRUSTED_BEYOND_K } from './measured-range';
+import { standardTests } from './standard-tests';
 import type { StorageRun } from './storage-run';
 import type { StorageSystem } from './storage-system';
 import { WallAtTemperature } from './wall-at-temperature';
+import { testWall } from './wall-in-test';
+import { describeWall } from './wall-profile';
 
 /** A layer's oxygen permeance must change by more than this, turned round, to be worth a sentence. */
 const ORIENTATION_MATTERS_ABOVE = 0.01;
@@ -24,11 +27,15 @@ export function warningsOf(system: StorageSystem, run: StorageRun, walls: WallAn
     ...passedAtPacking(run, system),
     ...system.pack.walls.flatMap((wall, w) =>
       wall.layers.flatMap((layer, l) =>
-        layerWarnings(layer, { path: `pack.walls[${w}].layers[${l}]`, wall: walls[w], index: l }, system),
+        layerWarnings(
+          layer,
+          { path: `pack.walls[${w}].layers[${l}]`, index: l, faces: facesOf(run, walls[w], w) },
+          system,
+        ),
       ),
     ),
     ...sealWarnings(system, run),
-    ...walls.flatMap((wall, w) => belowMeasurable(wall, w)),
+    ...walls.flatMap((wall, w) => belowMeasurable(wall, { index: w, layers: system.pack.walls[w].layers })),
     ...system.pack.walls.flatMap((wall, w) => orientation(wall.layers, { index: w, answer: walls[w] }, run)),
     ...rateWarnings(system),
   ];
@@ -103,20 +110,43 @@ function listed(temperatures: number[]): string {
   return low === high ? celsius(low) : `${celsius(low)} to ${celsius(high)}`;
 }
 
+/** The humidities at a wall's interfaces, outside face first: on every leg begun, and in every test. */
+interface WallFaces {
+  onRoute: number[][];
+  inTests: number[][];
+}
+
+function facesOf(run: StorageRun, wall: WallAnswer, index: number): WallFaces {
+  return {
+    onRoute: run.legStarts.map((start) => {
+      const conditions = run.conditions[start.leg];
+      return describeWall(conditions.pack.walls[index], {
+        humidityOutside: conditions.humidity,
+        humidityInside: start.insideHumidity,
+        oxygenOutsidePa: conditions.outsideOxygenPa,
+        oxygenInsidePa: start.insideOxygenPa,
+      }).water.interface_relative_humidity;
+    }),
+    inTests: wall.tests.map((test) => test.interface_relative_humidity),
+  };
+}
+
 function layerWarnings(
   layer: Layer,
-  { path, wall, index }: { path: string; wall: WallAnswer; index: number },
+  { path, index, faces }: { path: string; index: number; faces: WallFaces },
   system: StorageSystem,
 ): EngineWarning[] {
   const temperatures = [...new Set(system.legs.map((leg) => leg.temperatureK))];
-  const faces = wall.legs.flatMap((leg) => leg.water.interface_relative_humidity.slice(index, index + 2));
+  const ofLayer = (wall: number[][]) => wall.flatMap((interfaces) => interfaces.slice(index, index + 2));
   const warnings: EngineWarning[] = [];
   for (const name of ['oxygen', 'water'] as const) {
     const gas = layer[name];
     if (!gas) continue;
     const place = { path: `${path}.${name}`, words: `${layer.name}, ${name}` };
     warnings.push(...temperatureWarning(gas, place, temperatures));
-    warnings.push(...humidityWarning(gas, place, faces));
+    const onRoute = humidityWarning(gas, place, { seen: ofLayer(faces.onRoute), where: 'on this route' });
+    const inTests = humidityWarning(gas, place, { seen: ofLayer(faces.inTests), where: 'in the tests' });
+    warnings.push(...onRoute, ...inTests);
   }
   if (layer.defects) {
     warnings.push({
@@ -130,22 +160,30 @@ function layerWarnings(
   return warnings;
 }
 
-function humidityWarning(gas: GasInLayer, { path, words }: Place, faces: number[]): EngineWarning[] {
+function humidityWarning(
+  gas: GasInLayer,
+  { path, words }: Place,
+  { seen, where }: { seen: number[]; where: string },
+): EngineWarning[] {
   const { curve } = gas;
   if (!curve) return [];
-  const beyond = faces.filter((humidity) => isClearlyBeyond(curve.humidity, humidity));
+  const beyond = seen.filter((humidity) => isClearlyBeyond(curve.humidity, humidity));
   if (beyond.length === 0) return [];
   const first = curve.humidity[0];
   const last = curve.humidity[curve.humidity.length - 1];
   const low = Math.min(...beyond);
   const high = Math.max(...beyond);
+  const points = curve.factor.length;
+  const isRising = points > 1 && curve.factor[points - 1] > curve.factor[points - 2];
+  const lowerBound =
+    high > last && isRising ? ': the curve rises there, so more passes than is computed' : '';
   return [
     {
       code: 'humidity_beyond_curve',
       path: `${path}.humidity_curve`,
       message:
-        `${words}: its humidity curve runs from ${percent(first)} to ${percent(last)}; on this route the layer sees ` +
-        `${low === high ? percent(low) : `${percent(low)} to ${percent(high)}`}, where the last point is held.`,
+        `${words}: its humidity curve runs from ${percent(first)} to ${percent(last)}; ${where} the layer sees ` +
+        `${low === high ? percent(low) : `${percent(low)} to ${percent(high)}`}, where the last point is held${lowerBound}.`,
     },
   ];
 }
@@ -164,14 +202,23 @@ function sealWarnings(system: StorageSystem, run: StorageRun): EngineWarning[] {
     const gas = seal.film[name];
     if (!gas) return [];
     const place = { path: `pack.seal.${name}`, words: `Seal, ${name}` };
-    return [...temperatureWarning(gas, place, temperatures), ...humidityWarning(gas, place, faces)];
+    return [
+      ...temperatureWarning(gas, place, temperatures),
+      ...humidityWarning(gas, place, { seen: faces, where: 'on this route' }),
+    ];
   });
 }
 
-function belowMeasurable(wall: WallAnswer, index: number): EngineWarning[] {
-  const low = wall.tests.filter((test) => test.is_below_measurable);
+/** By the tests asked for; for a gas without one, by its standard tests. */
+function belowMeasurable(
+  wall: WallAnswer,
+  { index, layers }: { index: number; layers: Layer[] },
+): EngineWarning[] {
   return (['oxygen', 'water'] as const).flatMap((gas) => {
-    if (!low.some((test) => test.test.gas === gas)) return [];
+    const asked = wall.tests.filter((test) => test.test.gas === gas);
+    const standard = () =>
+      standardTests.filter((test) => test.gas === gas).map((test) => testWall(layers, test, ''));
+    if (!(asked.length > 0 ? asked : standard()).some((test) => test.is_below_measurable)) return [];
     const unit = gas === 'oxygen' ? 'cm³' : 'g';
     return [
       {

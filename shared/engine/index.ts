@@ -21,3 +21,28 @@ export {
 export { isothermMoisture, isothermActivity } from './isotherm-answer';
 export { storage } from './storage-answer';
 export { evaluate } from './evaluate';
+export { timeLag, type TimeLagDescription, type TimeLagLayer, type TimeLagAnswer } from './time-lag';
+export { transient, type TransientDescription, type TransientAnswer } from './transient';
+export { equalProgress, type EqualProgressDescription } from './equal-progress';
+export { light, type LightLayer, type Transmission } from './light';
+export { elasticities, type ElasticityRequest, type ElasticityAnswer } from './elasticity';
+export { type InputName } from './variable-system';
+export {
+  largestPermeance,
+  requiredThickness,
+  type LargestPermeanceRequest,
+  type LargestPermeanceAnswer,
+  type RequiredThicknessRequest,
+  type RequiredThicknessAnswer,
+} from './solve-for-target';
+export { type UncertaintyDescription, type UncertainInput } from './uncertainty';
+export {
+  drawColumns,
+  sampleDraws,
+  summariseDraws,
+  type DrawColumn,
+  type DrawRange,
+  type DrawSummary,
+  type DrawQuantile,
+} from './monte-carlo';
+export { packMakeUp, pouchCutArea, type MakeUpLayer, type MakeUpWall, type PackMakeUp } from './make-up';

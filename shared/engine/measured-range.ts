@@ -15,11 +15,9 @@ export function isBeyondMeasured(gas: GasInLayer, temperatureK: number): boolean
   return isBelow || isAbove;
 }
 
-/** True more than 15 K from the reference where no measured range is known. */
+/** True more than 15 K from the reference, on a side whose measured end is not known. */
 export function isFarFromReference(gas: GasInLayer, temperatureK: number): boolean {
-  return (
-    gas.measuredMinK === null &&
-    gas.measuredMaxK === null &&
-    Math.abs(temperatureK - gas.referenceK) > TRUSTED_BEYOND_K + ROUNDING_K
-  );
+  const beyondK = temperatureK - gas.referenceK;
+  const isEndUnknown = beyondK < 0 ? gas.measuredMinK === null : gas.measuredMaxK === null;
+  return isEndUnknown && Math.abs(beyondK) > TRUSTED_BEYOND_K + ROUNDING_K;
 }

@@ -20,6 +20,16 @@ const LAST = DEGREE;
 const COUNT = DEGREE + 1;
 const SLOPES = DIFFERENTIATION;
 
+/** Holds one prepared step; runs do not overlap, so one will do for all. */
+const SCRATCH = {
+  flow: new Float64Array(COUNT),
+  flowCoefficients: new Float64Array(COUNT),
+  flowIntegral: new Float64Array(COUNT + 1),
+  content: new Float64Array(COUNT),
+  contentCoefficients: new Float64Array(COUNT),
+  matrix: new Float64Array(LAST * COUNT),
+};
+
 /**
  * Oxygen in headspace, food and absorber [mol], advanced over pieces of a leg.
  *
@@ -52,12 +62,12 @@ export class OxygenStore {
   /** What passed so far, mol: the scale against which step errors are judged. */
   private passedMol = 0;
   private isUsedUpInStep = false;
-  private readonly flow = new Float64Array(COUNT);
-  private readonly flowCoefficients = new Float64Array(COUNT);
-  private readonly flowIntegral = new Float64Array(COUNT + 1);
-  private readonly content = new Float64Array(COUNT);
-  private readonly contentCoefficients = new Float64Array(COUNT);
-  private readonly matrix = new Float64Array(LAST * COUNT);
+  private readonly flow = SCRATCH.flow;
+  private readonly flowCoefficients = SCRATCH.flowCoefficients;
+  private readonly flowIntegral = SCRATCH.flowIntegral;
+  private readonly content = SCRATCH.content;
+  private readonly contentCoefficients = SCRATCH.contentCoefficients;
+  private readonly matrix = SCRATCH.matrix;
 
   constructor(system: StorageSystem, atFirstLeg: LegConditions) {
     this.mode = system.food.oxygenMode;

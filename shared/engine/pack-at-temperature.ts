@@ -26,6 +26,9 @@ export interface Pack {
   leaks: Leaks | null;
   headspaceM3: number;
   startingOxygenFraction: number;
+  /** On every wall's permeance to that gas, not on seal and leaks; 1 but in a search for a specification. */
+  oxygenFactor: number;
+  waterFactor: number;
 }
 
 /**
@@ -46,10 +49,14 @@ export class PackAtTemperature {
   water = 0;
   oxygen = 0;
   private isConstantKnown = false;
+  private readonly oxygenFactor: number;
+  private readonly waterFactor: number;
 
   constructor(pack: Pack, temperatureK: number, fluxTolerance = 0) {
     this.walls = pack.walls.map((wall) => new WallAtTemperature(wall.layers, temperatureK, fluxTolerance));
     this.areas = Float64Array.from(pack.walls, (wall) => wall.areaM2);
+    this.oxygenFactor = pack.oxygenFactor;
+    this.waterFactor = pack.waterFactor;
     this.seal = pack.seal ? new WallAtTemperature([pack.seal.film], temperatureK, fluxTolerance) : null;
     this.sealAreaM2 = pack.seal ? pack.seal.areaM2 : 0;
     const leaks = pack.leaks ?? { count: 0, lengthM: 1, diameterM: 1 };
@@ -71,14 +78,16 @@ export class PackAtTemperature {
   /** Conductances between two humidities; `difference` as in WallAtTemperature.solve. */
   conduct(outside: number, inside: number, difference: number = outside - inside): void {
     if (this.isConstantKnown) return;
-    let water = this.leaksWater;
-    let oxygen = this.leaksOxygen;
+    let water = 0;
+    let oxygen = 0;
     for (let i = 0; i < this.walls.length; i++) {
       const wall = this.walls[i];
       wall.solve(outside, inside, difference);
       water += wall.waterPermeance * this.areas[i];
       oxygen += wall.oxygenPermeance * this.areas[i];
     }
+    water = water * this.waterFactor + this.leaksWater;
+    oxygen = oxygen * this.oxygenFactor + this.leaksOxygen;
     if (this.seal) {
       this.seal.solve(outside, inside, difference);
       water += this.seal.waterPermeance * this.sealAreaM2;

@@ -15,10 +15,18 @@ import { conditionsOf, type LegConditions, type StorageSystem } from './storage-
 
 /** What the whole promises, relative in days, unless less is asked for. */
 export const RELATIVE_TOLERANCE = 1e-6;
-/** What a step may leave open of that, against time and oxygen passed since day 0. */
-const STEP_SHARE = 1e-2;
+/**
+ * What a step may leave open of that, against time and oxygen passed since day 0: little, as errors of thousands of
+ * steps may add up; a coarse run takes few.
+ */
+const STEP_SHARE = 5e-3;
+const COARSE_STEP_SHARE = 1e-1;
+/** From here on a run is coarse. */
+const COARSE = 1e-5;
 /** A parabola's remainder is judged by its last coefficient, so less of it is let through. */
 const PARABOLA_SHARE = 0.1;
+/** Of the first step of a leg, in ζ. */
+const FIRST_WIDTH = 0.3;
 /** How far a wall's flux may be from balance, of the tolerance. */
 const FLUX_SHARE = 1e-4;
 /** Closer than this to the air outside, the food counts as at rest with it. */
@@ -74,6 +82,9 @@ export function runStorage(
   return new Runner(system, firstLegsToSee, relativeTolerance).run();
 }
 
+/** Overwritten step by step; runs do not overlap, so one will do for all. */
+const SCRATCH = new MarchStep();
+
 class Runner {
   private readonly conditions: LegConditions[];
   private readonly oxygen: OxygenStore;
@@ -84,7 +95,7 @@ class Runner {
     rateEvaluations: 0,
     isStepLimitReached: false,
   };
-  private readonly step = new MarchStep();
+  private readonly step = SCRATCH;
   private readonly legStarts: LegStart[] = [];
   private readonly dryMassKg: number;
   private readonly mostEvaluations: number;
@@ -92,13 +103,15 @@ class Runner {
   private timeS = 0;
   private lastLeg = 0;
   private begun = 0;
+  /** Set where a step is given up before all its points are known. */
+  private narrowing = 1;
 
   constructor(
     private readonly system: StorageSystem,
     private readonly firstLegsToSee: number,
     relativeTolerance: number,
   ) {
-    this.stepTolerance = STEP_SHARE * relativeTolerance;
+    this.stepTolerance = (relativeTolerance >= COARSE ? COARSE_STEP_SHARE : STEP_SHARE) * relativeTolerance;
     this.conditions = conditionsOf(system, FLUX_SHARE * relativeTolerance);
     this.oxygen = new OxygenStore(system, this.conditions[0]);
     this.moisture = new MoistureTracker(system);
@@ -255,7 +268,7 @@ class Runner {
     step.startDistance = startDistance;
     let firstPace = this.paceAt(conditions, startDistance);
     let firstOxygen = pack.oxygen;
-    let width = Math.min(1, (1.05 * (endS - this.timeS)) / firstPace);
+    let width = Math.min(FIRST_WIDTH, (1.05 * (endS - this.timeS)) / firstPace);
     while (this.timeS < endS && Math.abs(step.startDistance) > AT_REST) {
       if (counters.rateEvaluations >= this.mostEvaluations) {
         counters.isStepLimitReached = true;
@@ -265,6 +278,11 @@ class Runner {
       step.pace[0] = firstPace * step.width;
       step.oxygen[0] = firstOxygen;
       const degree = this.sample(conditions);
+      if (degree === 0) {
+        counters.rejectedSteps += 1;
+        width = step.width * this.narrowing;
+        continue;
+      }
       const lastPace = step.pace[DEGREE] / step.width;
       const lastOxygen = step.oxygen[DEGREE];
       step.settleTime();
@@ -307,7 +325,7 @@ class Runner {
 
   /**
    * Fills the step's points, asking the pack at as few as the tolerance allows; gives the degree that was enough. For
-   * the highest it is not yet known whether it is: the step's own coefficients tell.
+   * the highest it is not yet known whether it is: the step's own coefficients tell. 0: not even that would be enough.
    */
   private sample(conditions: LegConditions): number {
     const { pace, oxygen } = this.step;
@@ -315,6 +333,7 @@ class Runner {
     this.sampleAt(conditions, 8);
     this.sampleAt(conditions, 4);
     let open = this.openPart(openEndOfTwo(pace), isOxygenHumid ? openEndOfTwo(oxygen) : 0);
+    if (this.isHopeless(open, 2)) return 0;
     if (open <= PARABOLA_SHARE) {
       fillFromTwo(pace);
       fillFromTwo(oxygen);
@@ -323,6 +342,7 @@ class Runner {
     this.sampleAt(conditions, 2);
     this.sampleAt(conditions, 6);
     open = this.openPart(openEndOfFour(pace), isOxygenHumid ? openEndOfFour(oxygen) : 0);
+    if (this.isHopeless(open, 4)) return 0;
     if (open <= 1) {
       fillFromFour(pace);
       fillFromFour(oxygen);
@@ -333,6 +353,18 @@ class Runner {
     this.sampleAt(conditions, 3);
     this.sampleAt(conditions, 1);
     return DEGREE;
+  }
+
+  /**
+   * Coefficients of a smooth function fall geometrically: what degree 2 or 4 leaves open foretells what 8 will. Notes
+   * how much narrower the step should be.
+   */
+  private isHopeless(open: number, degree: number): boolean {
+    const foretold = open * this.stepTolerance;
+    const wanted = this.stepTolerance ** (degree / DEGREE);
+    if (foretold <= 3 * wanted) return false;
+    this.narrowing = Math.max(0.1, 0.8 * (wanted / foretold) ** (1 / degree));
+    return this.step.width > 1e-12;
   }
 
   private sampleAt(conditions: LegConditions, node: number): void {

@@ -13,20 +13,29 @@ export interface WallSides {
 
 /** Each layer's share of a resistance. Tight foils share it evenly, so that shares add to 1. */
 function sharesOf(resistance: Float64Array): number[] {
-  const tight = resistance.reduce((count, value) => count + (value === Infinity ? 1 : 0), 0);
-  if (tight > 0) return Array.from(resistance, (value) => (value === Infinity ? 1 / tight : 0));
-  const sum = resistance.reduce((total, value) => total + value, 0);
-  return Array.from(resistance, (value) => value / sum);
+  let tight = 0;
+  let sum = 0;
+  for (let i = 0; i < resistance.length; i++) {
+    if (resistance[i] === Infinity) tight += 1;
+    sum += resistance[i];
+  }
+  const shares: number[] = [];
+  for (let i = 0; i < resistance.length; i++) {
+    if (tight > 0) shares.push(resistance[i] === Infinity ? 1 / tight : 0);
+    else shares.push(resistance[i] / sum);
+  }
+  return shares;
 }
 
 /** Values at the interfaces, outside first, falling by each layer's share of the difference. */
 function stair(outside: number, inside: number, shares: number[]): number[] {
   const values = [outside];
   let fallen = 0;
-  shares.forEach((share, i) => {
-    fallen += share;
-    values.push(i === shares.length - 1 ? inside : outside + (inside - outside) * fallen);
-  });
+  for (let i = 0; i < shares.length - 1; i++) {
+    fallen += shares[i];
+    values.push(outside + (inside - outside) * fallen);
+  }
+  values.push(inside);
   return values;
 }
 

@@ -37,5 +37,7 @@ export function wallState(layers: LayerDescription[], conditions: WallConditions
       ...label,
     }),
   });
-  return { ...state, temperature_C: conditions.temperature_C };
+  // As given, not by way of K and back.
+  state.temperature_C = conditions.temperature_C;
+  return state;
 }

@@ -91,12 +91,12 @@ export const DISPLAY_KINDS = {
   },
   water_permeance_mol_per_m2_s_Pa: {
     metric: { unit: 'g/(m²·day·kPa)', factor: GRAMS_PER_MOL_WATER * SECONDS_PER_DAY * 1000 },
-    us_customary: { unit: 'perm', factor: GRAMS_PER_MOL_WATER / 1000 / KG_PER_M2_S_PA_PER_PERM },
+    us_customary: { unit: 'perm (0 °C)', factor: GRAMS_PER_MOL_WATER / 1000 / KG_PER_M2_S_PA_PER_PERM },
   },
   water_permeability_mol_m_per_m2_s_Pa: {
     metric: { unit: 'g·µm/(m²·day·kPa)', factor: GRAMS_PER_MOL_WATER * SECONDS_PER_DAY * 1e9 },
     us_customary: {
-      unit: 'perm·mil',
+      unit: 'perm·mil (0 °C)',
       factor: (GRAMS_PER_MOL_WATER / 1000 / KG_PER_M2_S_PA_PER_PERM) * (1e6 / 25.4),
     },
   },
@@ -135,6 +135,12 @@ export function formatExact(value: number): string {
   return withMinus(groupThousands(String(rounded)));
 }
 
+/** Whether a conversion only moves the point, so that a given value keeps all its figures. */
+function isPowerOfTen(factor: number): boolean {
+  const power = Math.log10(factor);
+  return Math.abs(power - Math.round(power)) < 1e-9;
+}
+
 /** A stored value as shown in the reader's unit system. */
 export function formatQuantity(
   value: number,
@@ -143,7 +149,12 @@ export function formatQuantity(
 ): ShownQuantity {
   const { unit } = displayUnit(kind, options.unitSystem);
   const shown = toDisplay(value, kind, options.unitSystem);
-  const figures = options.isExact ? formatExact(shown) : formatNumber(shown, options.significant ?? 3);
+  const isAsGiven = options.isExact && isPowerOfTen(displayUnit(kind, options.unitSystem).factor);
+  const figures = isAsGiven
+    ? formatExact(shown)
+    : options.isExact
+      ? formatExact(Number(shown.toPrecision(3)))
+      : formatNumber(shown, options.significant ?? 3);
   return { figures, unit, text: unit === '' ? figures : `${figures}${NO_BREAK_SPACE}${unit}` };
 }
 
@@ -162,10 +173,13 @@ export function fromDisplay(shown: number, kind: DisplayKindName, unitSystem: Di
   return Number(((shown - (offset ?? 0)) / factor).toPrecision(12));
 }
 
-/** Reads what a person typed: decimal point or comma, spaces between thousands; NaN where it is no number. */
+/**
+ * Reads what a person typed: decimal point or comma, spaces between thousands; NaN where it is no number. "1,500" is
+ * refused: it is one thousand five hundred to some and one and a half to others.
+ */
 export function parseNumber(text: string): number {
   const compact = text.replace(/[\s\u00a0\u202f]/g, '').replace('−', '-');
-  if (compact === '') return NaN;
+  if (compact === '' || /^[+-]?[1-9]\d{0,2},\d{3}$/.test(compact)) return NaN;
   const pointed = /^[^.]*,[^,.]*$/.test(compact) ? compact.replace(',', '.') : compact;
   return /^[+-]?(\d+\.?\d*|\.\d+)(e[+-]?\d+)?$/i.test(pointed) ? Number(pointed) : NaN;
 }
@@ -179,7 +193,8 @@ function formatPower(value: number, significant: number): string {
 
 function groupThousands(plain: string): string {
   const [whole = '', decimals] = plain.split('.');
-  const grouped = whole.replace('-', '').length > 4 ? whole.replace(/\B(?=(\d{3})+(?!\d))/g, NO_BREAK_SPACE) : whole;
+  const grouped =
+    whole.replace('-', '').length > 4 ? whole.replace(/\B(?=(\d{3})+(?!\d))/g, NO_BREAK_SPACE) : whole;
   return decimals === undefined ? grouped : `${grouped}.${decimals}`;
 }
 

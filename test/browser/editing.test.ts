@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { DEVICES, expectNoAxeViolations, screenshot, type Device, type JourneyPage } from './harness/browser';
 import { useJourneyFile } from './harness/journey-file';
 import { insertOwnAccount, insertStock } from './harness/own-account';
-import { field, fillFields } from './steps/fields';
+import { field, fillFields, shownText } from './steps/fields';
 import { newPasswordLink } from './steps/mailbox';
 import { waitForTitle } from './steps/places';
 import { openSignIn, signIn } from './steps/sign-in';
@@ -27,7 +27,7 @@ describe.each(Object.keys(DEVICES) as Device[])('editing on %s', (device) => {
 
     await outerGauge(first).fill('60');
     await saveWallRevision(first);
-    await first.page.getByText('Now at revision 2.').waitFor();
+    await first.page.getByText(/revision 2\.$/).waitFor();
 
     await outerGauge(second).fill('40');
     await field(second.page, 'Name').fill('Mine, thinner');
@@ -35,15 +35,15 @@ describe.each(Object.keys(DEVICES) as Device[])('editing on %s', (device) => {
     const notice = second.page.getByRole('alert').filter({ hasText: 'was changed by somebody else' });
     await notice.waitFor();
     const both = notice.getByRole('table', { name: /mine and revision 2/ });
-    expect(await both.getByRole('row').nth(1).innerText()).toMatch(/40 µm[\s\S]*60 µm/);
-    expect(await notice.innerText()).toContain('Mine is called “Mine, thinner”');
+    expect(await shownText(both.getByRole('row').nth(1))).toMatch(/40 µm[\s\S]*60 µm/);
+    expect(await shownText(notice)).toContain('Mine is called “Mine, thinner”');
     expect(await outerGauge(second).inputValue()).toBe('40');
     await expectNoAxeViolations(second.page);
     await screenshot(second.page, `editing-${width}-1-told`);
 
     await second.press(notice.getByRole('button', { name: 'Save mine on top' }));
     await notice.waitFor({ state: 'hidden' });
-    await second.page.getByText('Now at revision 3.').waitFor();
+    await second.page.getByText(/revision 3\.$/).waitFor();
     await second.page.reload();
     await waitForTitle(second, 'Mine, thinner');
     expect(await outerGauge(second).inputValue()).toBe('40');

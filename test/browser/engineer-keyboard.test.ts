@@ -5,7 +5,7 @@ import { DEVICES, expectNoAxeViolations, screenshot, type Device, type JourneyPa
 import { useJourneyFile } from './harness/journey-file';
 import { hasVisibleFocus, tabTo, typeChoice, typeOver, type TabTarget } from './harness/keyboard';
 import { readAnswer } from './steps/answer';
-import { field } from './steps/fields';
+import { field, shownText } from './steps/fields';
 import { waitForTitle } from './steps/places';
 import { layerNames } from './steps/walls';
 
@@ -29,7 +29,7 @@ describe.each(Object.keys(DEVICES) as Device[])('an engineer with a keyboard alo
     expect(answer.first).toBe(answer.oxygenDay < answer.moistureDay ? 'oxygen' : 'moisture');
     await expectNoAxeViolations(page);
     await screenshot(page, `engineer-keyboard-${width}-2-answer`);
-    await openTableByKeyboard(page);
+    await openTableByKeyboard(page, wall);
     await visit.close();
   });
 });
@@ -80,7 +80,11 @@ async function buildWallByKeyboard(visit: JourneyPage, name: string): Promise<vo
   const [outer, barrier, inner] = asAdded as [string, string, string];
 
   // Reorder: by the row's own button, and back by Alt with an arrow key.
-  await reach(page, { role: 'button', name: `Move ${barrier}, layer 2 of 3 outwards` }, { isBackwards: true });
+  await reach(
+    page,
+    { role: 'button', name: `Move ${barrier}, layer 2 of 3 outwards` },
+    { isBackwards: true },
+  );
   await page.keyboard.press('Enter');
   await expect.poll(() => layerNames(page)).toEqual([barrier, outer, inner]);
   await page.keyboard.press('Alt+ArrowDown');
@@ -117,13 +121,16 @@ async function addLayerByKeyboard(page: Page, search: string, gauge: RegExp): Pr
   await picker.waitFor({ state: 'hidden' });
 }
 
-async function askByKeyboard(visit: JourneyPage, { study, wall }: { study: string; wall: string }): Promise<void> {
+async function askByKeyboard(
+  visit: JourneyPage,
+  { study, wall }: { study: string; wall: string },
+): Promise<void> {
   const { page } = visit;
   await fill(page, 'Name', study);
   const choices = [
     { label: 'Food', typed: 'Roasted haz', chosen: /hazelnut/i },
     { label: 'Pack', typed: 'Stand-up', chosen: /^Stand-up pouch/ },
-    { label: 'Route', typed: 'Europe to', chosen: /^Europe to/ },
+    { label: 'Route', typed: 'Europe', chosen: /^Europe/ },
   ];
   for (const { label, typed, chosen } of choices) {
     await reach(page, { role: 'combobox', name: label });
@@ -136,10 +143,9 @@ async function askByKeyboard(visit: JourneyPage, { study, wall }: { study: strin
   await waitForTitle(visit, study);
 }
 
-async function openTableByKeyboard(page: Page): Promise<void> {
+async function openTableByKeyboard(page: Page, wall: string): Promise<void> {
   await pressKeyOn(page, { role: 'button', name: 'Table of the ruler' }, 'Enter');
-  const region = { role: 'region', name: 'Days on the shelf' } as const;
-  const table = page.getByRole('table', { name: region.name });
+  const table = page.getByRole('table', { name: 'Days on the shelf' });
   await table.waitFor();
-  expect(await table.getByRole('row').count()).toBeGreaterThanOrEqual(2);
+  expect(await shownText(table)).toContain(wall);
 }

@@ -4,7 +4,14 @@ import { demoPeople } from '../../server/db/seed/demo-people';
 import { DEVICES, expectNoAxeViolations, screenshot, type JourneyPage } from './harness/browser';
 import { useJourneyFile } from './harness/journey-file';
 import { signIn } from './steps/sign-in';
-import { engineerScreens, GUEST_SCREENS, openScreen, OUTSIDE_SCREENS, unfold, type ListedScreen } from './steps/screens';
+import {
+  engineerScreens,
+  GUEST_SCREENS,
+  openScreen,
+  OUTSIDE_SCREENS,
+  unfold,
+  type ListedScreen,
+} from './steps/screens';
 
 const NARROW_PX = 360;
 

@@ -6,20 +6,20 @@ import { compare, readCheckCases, runCase, type Mismatch } from '../reference/ch
 const read = (name: string): ReturnType<typeof readCheckCases> =>
   readCheckCases(readFileSync(path.join(__dirname, '..', 'reference', name), 'utf8'));
 
-describe('the check cases of sections 1 to 7', () => {
+describe('the check cases but those of section 10', () => {
   const file = read('check-cases.json');
-  const ours = file.cases.filter((given) => Number.parseFloat(given.section) < 8);
+  const ours = file.cases.filter((given) => given.section !== '10');
 
   it('are all there', () => {
-    expect(ours).toHaveLength(40);
+    expect(ours).toHaveLength(49);
   });
 
   it.each(ours.map((given) => [`${given.id} ${given.description}`, given] as const))('%s', (_name, given) => {
     expect(runCase(given, file.atol_by_key)).toEqual({ status: 'passed' });
   });
 
-  it('leaves the later sections for later', () => {
-    const later = file.cases.filter((given) => Number.parseFloat(given.section) >= 8);
+  it('leaves the fits for later', () => {
+    const later = file.cases.filter((given) => given.section === '10');
     expect(later.map((given) => runCase(given, file.atol_by_key).status)).toEqual(later.map(() => 'skipped'));
   });
 });

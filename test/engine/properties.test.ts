@@ -1,129 +1,104 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { storage, wallState, type FilmDescription, type LayerDescription } from '../../shared/engine';
+import { storage, wallState, type LayerDescription } from '../../shared/engine';
 import { convert, UNITS, unitsOfKind, type UnitName } from '../../shared/units';
 import { description, foil } from './descriptions';
+import { conditions, decades, humidity, layers, near, number } from './property-inputs';
 
-const number = (min: number, max: number): fc.Arbitrary<number> => fc.double({ min, max, noNaN: true });
-/** Evenly spread over decades. */
-const decades = (min: number, max: number): fc.Arbitrary<number> =>
-  number(min, max).map((power) => 10 ** power);
-
-/** Humidities as people give them, to four digits. */
-const humidity = fc.integer({ min: 0, max: 10_000 }).map((step) => step / 10_000);
-
-const curve = fc.uniqueArray(humidity, { minLength: 1, maxLength: 6 }).chain((points) =>
-  fc.array(decades(-2, 2), { minLength: points.length, maxLength: points.length }).map((factor) => ({
-    relative_humidity: [...points].sort((a, b) => a - b),
-    factor,
-  })),
-);
-
-const gas = (low: number, high: number) =>
-  fc.record({
-    permeability_mol_m_per_m2_s_Pa: decades(low, high),
-    activation_energy_J_per_mol: number(-20_000, 60_000),
-    reference_relative_humidity: humidity,
-    humidity_curve: fc.option(curve, { nil: undefined }),
-  });
-
-const film: fc.Arbitrary<FilmDescription> = fc.record({
-  kind: fc.constant('film' as const),
-  name: fc.constant('film'),
-  thickness_um: decades(-1, 3),
-  oxygen: gas(-20, -15),
-  water: gas(-15, -12),
-});
-
-const layers = fc.array(film, { minLength: 1, maxLength: 6 });
-const conditions = fc.record({
-  temperature_C: number(-30, 60),
-  relative_humidity_outside: humidity,
-  relative_humidity_inside: humidity,
-  oxygen_pressure_outside_Pa: number(0, 21_000),
-  oxygen_pressure_inside_Pa: number(0, 21_000),
-});
-
-const near = (a: number, b: number, tolerance: number): boolean =>
-  Math.abs(a - b) <= tolerance * Math.max(Math.abs(a), Math.abs(b));
-
-const RUNS = { numRuns: 300 };
+const RUNS = { numRuns: 1000 };
+const SLOW = 120_000;
 
 describe('a wall', () => {
-  it('shares its resistance out completely and falls one way through the stair', () => {
-    fc.assert(
-      fc.property(layers, conditions, (wall, at) => {
-        const { water, oxygen } = wallState(wall, at);
-        for (const { resistance_share: shares } of [water, oxygen]) {
-          expect(shares.every((share) => share >= 0)).toBe(true);
+  it(
+    'shares its resistance out completely and falls one way through the stair',
+    () => {
+      fc.assert(
+        fc.property(layers, conditions, (wall, at) => {
+          const { water, oxygen } = wallState(wall, at);
+          for (const { resistance_share: shares } of [water, oxygen]) {
+            expect(shares.every((share) => share >= 0)).toBe(true);
+            expect(
+              near(
+                shares.reduce((sum, share) => sum + share, 0),
+                1,
+                1e-12,
+              ),
+            ).toBe(true);
+          }
+          const falls = Math.sign(at.relative_humidity_inside - at.relative_humidity_outside);
+          water.interface_relative_humidity.forEach((value, i, all) => {
+            if (i > 0) expect((value - all[i - 1]) * falls).toBeGreaterThanOrEqual(-1e-15);
+          });
+        }),
+        RUNS,
+      );
+    },
+    SLOW,
+  );
+
+  it(
+    'turned round in turned-round air is the same wall',
+    () => {
+      fc.assert(
+        fc.property(layers, conditions, (wall, at) => {
+          const as = wallState(wall, at);
+          const turned = wallState([...wall].reverse(), {
+            ...at,
+            relative_humidity_outside: at.relative_humidity_inside,
+            relative_humidity_inside: at.relative_humidity_outside,
+          });
+          expect(near(as.water.permeance_mol_per_m2_s_Pa, turned.water.permeance_mol_per_m2_s_Pa, 1e-9)).toBe(
+            true,
+          );
           expect(
-            near(
-              shares.reduce((sum, share) => sum + share, 0),
-              1,
-              1e-12,
-            ),
+            near(as.oxygen.permeance_mol_per_m2_s_Pa, turned.oxygen.permeance_mol_per_m2_s_Pa, 1e-8),
           ).toBe(true);
-        }
-        const falls = Math.sign(at.relative_humidity_inside - at.relative_humidity_outside);
-        water.interface_relative_humidity.forEach((value, i, all) => {
-          if (i > 0) expect((value - all[i - 1]) * falls).toBeGreaterThanOrEqual(-1e-15);
-        });
-      }),
-      RUNS,
-    );
-  });
+        }),
+        RUNS,
+      );
+    },
+    SLOW,
+  );
 
-  it('turned round in turned-round air is the same wall', () => {
-    fc.assert(
-      fc.property(layers, conditions, (wall, at) => {
-        const as = wallState(wall, at);
-        const turned = wallState([...wall].reverse(), {
-          ...at,
-          relative_humidity_outside: at.relative_humidity_inside,
-          relative_humidity_inside: at.relative_humidity_outside,
-        });
-        expect(near(as.water.permeance_mol_per_m2_s_Pa, turned.water.permeance_mol_per_m2_s_Pa, 1e-9)).toBe(
-          true,
-        );
-        expect(near(as.oxygen.permeance_mol_per_m2_s_Pa, turned.oxygen.permeance_mol_per_m2_s_Pa, 1e-8)).toBe(
-          true,
-        );
-      }),
-      RUNS,
-    );
-  });
+  it(
+    'does not change when a layer is cut in two',
+    () => {
+      fc.assert(
+        fc.property(layers, conditions, number(0.05, 0.95), (wall, at, part) => {
+          const [first, ...others] = wall;
+          const cut: LayerDescription[] = [
+            { ...first, thickness_um: first.thickness_um * part },
+            { ...first, thickness_um: first.thickness_um * (1 - part) },
+            ...others,
+          ];
+          const whole = wallState(wall, at);
+          const parts = wallState(cut, at);
+          expect(
+            near(whole.water.permeance_mol_per_m2_s_Pa, parts.water.permeance_mol_per_m2_s_Pa, 1e-9),
+          ).toBe(true);
+          expect(
+            near(whole.oxygen.permeance_mol_per_m2_s_Pa, parts.oxygen.permeance_mol_per_m2_s_Pa, 1e-8),
+          ).toBe(true);
+        }),
+        RUNS,
+      );
+    },
+    SLOW,
+  );
 
-  it('does not change when a layer is cut in two', () => {
-    fc.assert(
-      fc.property(layers, conditions, number(0.05, 0.95), (wall, at, part) => {
-        const [first, ...others] = wall;
-        const cut: LayerDescription[] = [
-          { ...first, thickness_um: first.thickness_um * part },
-          { ...first, thickness_um: first.thickness_um * (1 - part) },
-          ...others,
-        ];
-        const whole = wallState(wall, at);
-        const parts = wallState(cut, at);
-        expect(near(whole.water.permeance_mol_per_m2_s_Pa, parts.water.permeance_mol_per_m2_s_Pa, 1e-9)).toBe(
-          true,
-        );
-        expect(
-          near(whole.oxygen.permeance_mol_per_m2_s_Pa, parts.oxygen.permeance_mol_per_m2_s_Pa, 1e-8),
-        ).toBe(true);
-      }),
-      RUNS,
-    );
-  });
-
-  it('lets nothing through once a whole foil lies in it', () => {
-    fc.assert(
-      fc.property(layers, conditions, (wall, at) => {
-        const { water, oxygen } = wallState([...wall, foil], at);
-        expect([water.flux_mol_per_m2_s, oxygen.flux_mol_per_m2_s].map(Math.abs)).toEqual([0, 0]);
-      }),
-      RUNS,
-    );
-  });
+  it(
+    'lets nothing through once a whole foil lies in it',
+    () => {
+      fc.assert(
+        fc.property(layers, conditions, (wall, at) => {
+          const { water, oxygen } = wallState([...wall, foil], at);
+          expect([water.flux_mol_per_m2_s, oxygen.flux_mol_per_m2_s].map(Math.abs)).toEqual([0, 0]);
+        }),
+        RUNS,
+      );
+    },
+    SLOW,
+  );
 });
 
 describe('a pack on its way', () => {
@@ -160,36 +135,45 @@ describe('a pack on its way', () => {
       report_days: [3, 77, 499],
     });
 
-  it('lives as long when everything is twice as large', () => {
-    fc.assert(
-      fc.property(moist, (pack) => {
-        const one = storage(given(pack));
-        const two = storage(given(pack, 2));
-        expect(two.first_limit).toBe(one.first_limit);
-        if (one.shelf_life_days) expect(near(two.shelf_life_days ?? 0, one.shelf_life_days, 1e-9)).toBe(true);
-        two.courses?.moisture_g_per_g?.forEach((value, i) =>
-          expect(near(value, one.courses?.moisture_g_per_g?.[i] ?? Number.NaN, 1e-9)).toBe(true),
-        );
-      }),
-      { numRuns: 100 },
-    );
-  });
+  it(
+    'lives as long when everything is twice as large',
+    () => {
+      fc.assert(
+        fc.property(moist, (pack) => {
+          const one = storage(given(pack));
+          const two = storage(given(pack, 2));
+          expect(two.first_limit).toBe(one.first_limit);
+          if (one.shelf_life_days)
+            expect(near(two.shelf_life_days ?? 0, one.shelf_life_days, 1e-9)).toBe(true);
+          two.courses?.moisture_g_per_g?.forEach((value, i) =>
+            expect(near(value, one.courses?.moisture_g_per_g?.[i] ?? Number.NaN, 1e-9)).toBe(true),
+          );
+        }),
+        RUNS,
+      );
+    },
+    SLOW,
+  );
 
-  it('only gains uptake, and keeps moisture between where it began and the air it met', () => {
-    fc.assert(
-      fc.property(moist, (pack) => {
-        const { courses } = storage(given(pack));
-        const uptake = courses?.oxygen_uptake_mg_per_kg ?? [];
-        uptake.forEach((value, i) =>
-          expect(value).toBeGreaterThanOrEqual(i > 0 ? uptake[i - 1] * (1 - 1e-12) : 0),
-        );
-        courses?.moisture_g_per_g?.forEach((value) =>
-          expect(Number.isFinite(value) && value >= 0).toBe(true),
-        );
-      }),
-      { numRuns: 100 },
-    );
-  });
+  it(
+    'only gains uptake, and keeps moisture between where it began and the air it met',
+    () => {
+      fc.assert(
+        fc.property(moist, (pack) => {
+          const { courses } = storage(given(pack));
+          const uptake = courses?.oxygen_uptake_mg_per_kg ?? [];
+          uptake.forEach((value, i) =>
+            expect(value).toBeGreaterThanOrEqual(i > 0 ? uptake[i - 1] * (1 - 1e-12) : 0),
+          );
+          courses?.moisture_g_per_g?.forEach((value) =>
+            expect(Number.isFinite(value) && value >= 0).toBe(true),
+          );
+        }),
+        RUNS,
+      );
+    },
+    SLOW,
+  );
 });
 
 describe('units', () => {

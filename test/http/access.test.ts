@@ -34,7 +34,9 @@ const EXPECTED: Record<string, Expectation> = {
         [`post ${path}`, WRITERS],
         [`get ${path}/:id`, READERS],
         [`put ${path}/:id`, WRITERS],
+        [`put ${path}/:id/archived`, WRITERS],
         [`get ${path}/:id/revisions`, READERS],
+        ...(collection === 'studies' ? [] : [[`get ${path}/:id/uses`, READERS]]),
       ];
     }),
   ),

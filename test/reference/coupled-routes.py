@@ -74,6 +74,7 @@ class SecantWall(Wall):
             return super().solve(hout, hin)
         self.guess = math.exp(x1) / (hi - lo)
         resistance = 0.0
+        self.rise, self.oxygen = rise, []
         for i in range(n):
             own, fo = self.g["oxygen"][i], self.f["oxygen"][i]
             if own > 0 and not fo.none:
@@ -90,13 +91,13 @@ class SecantWall(Wall):
                             num += w * d * math.exp(lw - fo.ln(m + d * u))
                             den += w * d * math.exp(lw)
                     own *= den / num
-            resistance += 1 / (own + do[i])
+            self.oxygen.append(1 / (own + do[i]))
+            resistance += self.oxygen[i]
         return self.guess, 1 / resistance
 
 
 second.Wall = SecantWall
 rnd = second.rnd
-rnd.seed(20260805)
 
 KINDS = ["evoh", "evoh turned", "two", "cellulose", "starch", "coated", "coated curved", "coated holed", "foil holed"]
 
@@ -134,6 +135,7 @@ def rounded(x):
 
 
 def main():
+    rnd.seed(20260805)
     cases = []
     for i in range(CASES):
         s = case()
@@ -154,4 +156,5 @@ def main():
     print()
 
 
-main()
+if __name__ == "__main__":
+    main()

@@ -1,5 +1,12 @@
 import { describe, expect, it } from 'vitest';
-import { formatExact, formatNumber, formatQuantity, fromDisplay, parseNumber, toDisplay } from '../../shared/units/format';
+import {
+  formatExact,
+  formatNumber,
+  formatQuantity,
+  fromDisplay,
+  parseNumber,
+  toDisplay,
+} from '../../shared/units/format';
 
 describe('formatNumber', () => {
   it.each([
@@ -49,12 +56,21 @@ describe('unit systems', () => {
 
   it('gives back what was typed', () => {
     for (const typed of [0.48, 1, 2.3, 99.9]) {
-      expect(toDisplay(fromDisplay(typed, 'thickness_um', 'us_customary'), 'thickness_um', 'us_customary')).toBeCloseTo(
-        typed,
-        10,
-      );
+      expect(
+        toDisplay(fromDisplay(typed, 'thickness_um', 'us_customary'), 'thickness_um', 'us_customary'),
+      ).toBeCloseTo(typed, 10);
     }
     expect(fromDisplay(100, 'temperature_C', 'us_customary')).toBeCloseTo(37.7777777778, 9);
+  });
+
+  it('shows a given value in full, and a converted one in three figures', () => {
+    const options = { isExact: true } as const;
+    expect(formatQuantity(0.7435, 'area_m2', { ...options, unitSystem: 'metric' }).text).toBe(
+      '7435\u00a0cm²',
+    );
+    expect(formatQuantity(12, 'thickness_um', { ...options, unitSystem: 'us_customary' }).text).toBe(
+      '0.472\u00a0mil',
+    );
   });
 
   it('keeps figures and unit together', () => {
@@ -65,6 +81,8 @@ describe('unit systems', () => {
 describe('parseNumber', () => {
   it.each([
     ['1,5', 1.5],
+    ['0,500', 0.5],
+    ['1,50', 1.5],
     ['1.5', 1.5],
     ['−3', -3],
     ['177 165', 177_165],
@@ -73,7 +91,10 @@ describe('parseNumber', () => {
     expect(parseNumber(text)).toBe(value);
   });
 
-  it.each(['', 'abc', '1,2,3', '1.2.3', 'NaN', 'Infinity', '0x10'])('refuses %s', (text) => {
-    expect(parseNumber(text)).toBeNaN();
-  });
+  it.each(['', 'abc', '1,500', '-12,345', '1,2,3', '1.2.3', 'NaN', 'Infinity', '0x10'])(
+    'refuses %s',
+    (text) => {
+      expect(parseNumber(text)).toBeNaN();
+    },
+  );
 });

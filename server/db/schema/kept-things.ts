@@ -1,3 +1,4 @@
+import { sql } from 'drizzle-orm';
 import { foreignKey, index, integer, jsonb, pgTable, text, unique, uuid } from 'drizzle-orm/pg-core';
 import type { FoodSpec } from '../../../shared/contract/foods';
 import type { LaminateSpec } from '../../../shared/contract/laminates';
@@ -6,10 +7,13 @@ import type { PackSpec } from '../../../shared/contract/packs';
 import type { RouteSpec } from '../../../shared/contract/routes';
 import type { StudySpec } from '../../../shared/contract/studies';
 import { accounts } from './accounts';
-import { createdAt, id } from './columns';
+import { createdAt, id, instant } from './columns';
 import { users } from './people';
 
-/** A thing is its id and which revision is current; all it says stands in its revisions, which never change. */
+/**
+ * A thing is its id, which revision is current, and whether it is archived; all it says stands in its revisions, which
+ * never change. The current revision's name is repeated here, for search and order.
+ */
 function thingTable(name: string) {
   return pgTable(
     name,
@@ -20,13 +24,24 @@ function thingTable(name: string) {
         .references(() => accounts.id),
       /** A deferred foreign key to its own revisions stands in the hand-written migration. */
       currentRevisionId: uuid('current_revision_id').notNull(),
+      name: text('name').notNull(),
+      /** Null: in use. */
+      archivedAt: instant('archived_at'),
       createdAt: createdAt(),
     },
-    (table) => [unique(`${name}_of_account`).on(table.accountId, table.id)],
+    (table) => [
+      unique(`${name}_of_account`).on(table.accountId, table.id),
+      index(`${name}_by_name`).on(table.accountId, sql`lower(${table.name})`, table.id),
+    ],
   );
 }
 
-function revisionTable<Spec>(name: string, things: ReturnType<typeof thingTable>) {
+/** `isAskedInside`: specs are searched for what they name (a material, a laminate, a tag), so they are indexed. */
+function revisionTable<Spec>(
+  name: string,
+  things: ReturnType<typeof thingTable>,
+  { isAskedInside = false }: { isAskedInside?: boolean } = {},
+) {
   return pgTable(
     name,
     {
@@ -48,6 +63,7 @@ function revisionTable<Spec>(name: string, things: ReturnType<typeof thingTable>
       unique(`${name}_number`).on(table.thingId, table.number),
       unique(`${name}_of_thing`).on(table.thingId, table.id),
       index(`${name}_of_account`).on(table.accountId, table.thingId),
+      ...(isAskedInside ? [index(`${name}_inside`).using('gin', sql`${table.spec} jsonb_path_ops`)] : []),
     ],
   );
 }
@@ -55,15 +71,19 @@ function revisionTable<Spec>(name: string, things: ReturnType<typeof thingTable>
 export const materials = thingTable('materials');
 export const materialRevisions = revisionTable<MaterialSpec>('material_revisions', materials);
 export const laminates = thingTable('laminates');
-export const laminateRevisions = revisionTable<LaminateSpec>('laminate_revisions', laminates);
+export const laminateRevisions = revisionTable<LaminateSpec>('laminate_revisions', laminates, {
+  isAskedInside: true,
+});
 export const packs = thingTable('packs');
-export const packRevisions = revisionTable<PackSpec>('pack_revisions', packs);
+export const packRevisions = revisionTable<PackSpec>('pack_revisions', packs, { isAskedInside: true });
 export const foods = thingTable('foods');
 export const foodRevisions = revisionTable<FoodSpec>('food_revisions', foods);
 export const routes = thingTable('routes');
 export const routeRevisions = revisionTable<RouteSpec>('route_revisions', routes);
 export const studies = thingTable('studies');
-export const studyRevisions = revisionTable<StudySpec>('study_revisions', studies);
+export const studyRevisions = revisionTable<StudySpec>('study_revisions', studies, {
+  isAskedInside: true,
+});
 
 export type ThingTable = ReturnType<typeof thingTable>;
 export type RevisionTable<Spec> = ReturnType<typeof revisionTable<Spec>>;

@@ -1,6 +1,8 @@
 import {
   MATERIAL_CLASSES,
+  type CoatingLight,
   type CoatingMaterialSpec,
+  type FilmLight,
   type FilmMaterialSpec,
   type MaterialSpec,
   type StatedValue,
@@ -22,6 +24,13 @@ interface LibraryGas {
   geometricSd: number | null;
 }
 
+interface LibraryLight {
+  uvPerUm?: number;
+  visiblePerUm?: number;
+  uv?: number;
+  visible?: number;
+}
+
 interface LibraryMaterial {
   id: string;
   name: string;
@@ -35,6 +44,7 @@ interface LibraryMaterial {
   pinholes?: { densityPerM2: number; diameterUm: number } | null;
   priceEurPerKg: number | null;
   priceEurPerM2: number | null;
+  light: LibraryLight | null;
   notes: string;
   provenance: LibraryProvenance;
 }
@@ -67,8 +77,26 @@ function specOf(material: LibraryMaterial): MaterialSpec {
   if (!material.oxygen || !material.water)
     throw new Error(`${material.id}: a ${material.kind} needs both gases.`);
   return material.kind === 'film'
-    ? { ...common, kind: 'film', ...filmGases(material.oxygen, material.water) }
-    : { ...common, kind: 'coating', ...coatingGases(material.oxygen, material.water), defects };
+    ? { ...common, kind: 'film', ...filmGases(material.oxygen, material.water), light: filmLight(material) }
+    : {
+        ...common,
+        kind: 'coating',
+        ...coatingGases(material.oxygen, material.water),
+        defects,
+        light: wholeLight(material),
+      };
+}
+
+function filmLight(material: LibraryMaterial): FilmLight | null {
+  const { uvPerUm, visiblePerUm } = material.light ?? {};
+  if (uvPerUm === undefined || visiblePerUm === undefined) return wholeLight(material);
+  return { per_um: { uv_350nm: uvPerUm, visible_550nm: visiblePerUm } };
+}
+
+function wholeLight({ light }: LibraryMaterial): CoatingLight | null {
+  const { uv, visible } = light ?? {};
+  if (uv === undefined || visible === undefined) return null;
+  return { whole: { uv_350nm: uv, visible_550nm: visible } };
 }
 
 function filmGases(oxygen: LibraryGas, water: LibraryGas): Pick<FilmMaterialSpec, 'oxygen' | 'water'> {

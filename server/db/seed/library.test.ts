@@ -5,6 +5,7 @@ import { routeSpecSchema } from '../../../shared/contract/routes';
 import { wallInTest, type LayerDescription, type TransmissionTest } from '../../../shared/engine';
 import { fromSi } from '../../../shared/units';
 import { demoAccount, demoLaminates, demoMassesKg, demoStudies } from './demo-account';
+import { demoMaterialSpecs } from './demo-materials';
 import { demoPeople } from './demo-people';
 import { libraryFoods } from './library-foods';
 import { libraryMaterials } from './library-materials';
@@ -14,6 +15,18 @@ const STRICT = { strict: true, abortEarly: false } as const;
 const materials = libraryMaterials();
 
 describe('the library', () => {
+  it('knows the light of everything but foil, which passes it by its pinholes', () => {
+    for (const { libraryId, spec } of materials) {
+      if (spec.kind !== 'foil') expect(spec.light, libraryId).not.toBeNull();
+    }
+    const ofId = (id: string) => materials.find((material) => material.libraryId === id)?.spec;
+    expect(ofId('bopet')).toMatchObject({ light: { per_um: { uv_350nm: 0.986, visible_550nm: 0.999 } } });
+    expect(ofId('ink')).toMatchObject({ light: { whole: { uv_350nm: 0.4, visible_550nm: 0.55 } } });
+    expect(ofId('siox-on-bopet')).toMatchObject({
+      light: { whole: { uv_350nm: 0.75, visible_550nm: 0.96 } },
+    });
+  });
+
   it('fits the contract', () => {
     expect(materials).toHaveLength(49);
     for (const { spec } of materials) materialSpecSchema.validateSync(spec, STRICT);
@@ -74,8 +87,16 @@ describe('the demo', () => {
   });
 
   it('builds its walls from the library and its studies from its walls', () => {
-    const ids = new Set(materials.map((material) => material.libraryId));
+    const ids = new Set([
+      ...materials.map((material) => material.libraryId),
+      ...demoMaterialSpecs().map(({ key }) => key),
+    ]);
     for (const { layers } of demoLaminates) for (const [id] of layers) expect(ids).toContain(id);
-    expect(demoStudies.length).toBeGreaterThanOrEqual(3);
+    expect(demoStudies.length).toBeGreaterThanOrEqual(6);
+    for (const { laminates } of demoStudies) {
+      expect(laminates.length).toBeGreaterThanOrEqual(2);
+      expect(laminates.length).toBeLessThanOrEqual(4);
+    }
+    for (const { spec } of demoMaterialSpecs()) materialSpecSchema.validateSync(spec, STRICT);
   });
 });

@@ -1,5 +1,6 @@
 import { eq } from 'drizzle-orm';
 import type { LaminateSpec } from '../../../shared/contract/laminates';
+import type { PackSpec } from '../../../shared/contract/packs';
 import type { KeptThing } from '../../../shared/contract/kept-things';
 import type { Database, Transaction } from '../../db/client';
 import { insertThing, type ThingTables } from '../../db/kept-thing-store';
@@ -16,7 +17,15 @@ import {
   routeRevisions,
   routes,
 } from '../../db/schema';
-import { demoAccount, demoLaminates, demoMassesKg, demoPacks, demoStudies } from '../../db/seed/demo-account';
+import {
+  demoAccount,
+  demoLaminates,
+  demoMassesKg,
+  demoPacks,
+  demoStudies,
+  demoTrays,
+} from '../../db/seed/demo-account';
+import { demoMaterialSpecs } from '../../db/seed/demo-materials';
 import { demoPeople } from '../../db/seed/demo-people';
 import { libraryFoods } from '../../db/seed/library-foods';
 import { libraryMaterials } from '../../db/seed/library-materials';
@@ -45,9 +54,15 @@ export async function seedDemo({ db, engine }: { db: Database; engine: EnginePor
         food_id: idOf(kept, `foods/${study.food}`),
         pack_id: idOf(kept, `packs/${study.pack}`),
         route_id: idOf(kept, `routes/${study.route}`),
-        laminate_ids: [idOf(kept, `laminates/${study.laminate}`)],
+        laminate_ids: study.laminates.map((key) => idOf(kept, `laminates/${key}`)),
         target_days: study.targetDays,
         notes: study.notes,
+        tags: [...study.tags],
+        laminate_notes: Object.entries(study.verdicts ?? {}).map(([key, [verdict, note]]) => ({
+          laminate_id: idOf(kept, `laminates/${key}`),
+          verdict,
+          note,
+        })),
       };
       await createStudy(tx, engine, { actor, spec });
     }
@@ -73,10 +88,13 @@ async function seedPeople(tx: Transaction): Promise<{ accountId: string; enginee
 /** By collection and the library's own id. */
 async function seedThings(tx: Transaction, accountId: string): Promise<Kept> {
   const kept: Kept = new Map();
-  async function keep<Spec>(key: string, tables: ThingTables<Spec>, spec: Spec) {
+  async function keep<Spec extends { name: string }>(key: string, tables: ThingTables<Spec>, spec: Spec) {
     kept.set(key, await insertThing(tx, tables, { accountId, spec, createdBy: null }));
   }
   // Lists show the newest first: what the library names first is inserted last.
+  for (const { key, spec } of demoMaterialSpecs()) {
+    await keep(`materials/${key}`, { things: materials, revisions: materialRevisions }, spec);
+  }
   for (const { libraryId, spec } of libraryMaterials().reverse()) {
     await keep(`materials/${libraryId}`, { things: materials, revisions: materialRevisions }, spec);
   }
@@ -102,6 +120,22 @@ async function seedThings(tx: Transaction, accountId: string): Promise<Kept> {
       }),
     };
     await keep(`laminates/${laminate.key}`, { things: laminates, revisions: laminateRevisions }, spec);
+  }
+  for (const tray of demoTrays) {
+    const spec: PackSpec = {
+      name: tray.name,
+      form: {
+        type: 'tray',
+        tray_area_m2: tray.trayAreaM2,
+        lid_area_m2: tray.lidAreaM2,
+        tray_laminate_id: idOf(kept, `laminates/${tray.trayLaminate}`),
+      },
+      headspace_cm3: tray.headspaceCm3,
+      starting_headspace_oxygen_percent: tray.startingHeadspaceOxygenPercent,
+      has_seal_path: false,
+      leaks: null,
+    };
+    await keep(`packs/${tray.key}`, { things: packs, revisions: packRevisions }, spec);
   }
   return kept;
 }

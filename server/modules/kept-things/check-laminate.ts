@@ -1,12 +1,18 @@
 import type { LaminateSpec } from '../../../shared/contract/laminates';
 import type { FieldFault } from '../../../shared/errors/error-code';
 import type { Queryable } from '../../db/client';
-import { findRevisions } from '../../db/kept-thing-store';
+import { findArchivedIds, findRevisions } from '../../db/kept-thing-store';
 import { materialRevisions, materials } from '../../db/schema';
 import { inputInvalid } from '../../http/app-error';
 
-/** Every layer names a material of this account and a revision of that material. */
-export async function checkLaminate(db: Queryable, accountId: string, spec: LaminateSpec): Promise<void> {
+/**
+ * Every layer names a material of this account and a revision of that material. An archived material may stay where
+ * it was, not come in anew.
+ */
+export async function checkLaminate(
+  db: Queryable,
+  { accountId, spec, base }: { accountId: string; spec: LaminateSpec; base?: LaminateSpec },
+): Promise<void> {
   const ids = [...new Set(spec.layers.map((layer) => layer.material_revision_id))];
   const found = await findRevisions(
     db,
@@ -14,9 +20,21 @@ export async function checkLaminate(db: Queryable, accountId: string, spec: Lami
     { accountId, ids },
   );
   const materialByRevision = new Map(found.map(({ thingId, revision }) => [revision.id, thingId]));
+  const kept = new Set(base?.layers.map((layer) => layer.material_id));
+  const chosenAnew = spec.layers.map((layer) => layer.material_id).filter((id) => !kept.has(id));
+  const archived = await findArchivedIds(db, materials, [...new Set(chosenAnew)]);
   const faults = spec.layers.flatMap((layer, i): FieldFault[] => {
     const materialId = materialByRevision.get(layer.material_revision_id);
-    if (materialId === layer.material_id) return [];
+    if (materialId === layer.material_id) {
+      if (!archived.has(materialId)) return [];
+      return [
+        {
+          path: `spec.layers[${i}].material_id`,
+          value: materialId,
+          message: 'Material: this one is archived. Bring it back first, or choose another.',
+        },
+      ];
+    }
     const field = materialId === undefined ? 'material_revision_id' : 'material_id';
     return [
       {

@@ -6,6 +6,7 @@ import {
   keptThingSchema,
   pageSchema,
   reviseRequestSchema,
+  namedRevisionSchema,
   revisionSchema,
   type Collection,
 } from '../../../shared/contract/kept-things';
@@ -31,10 +32,17 @@ import { schemaOf, type ResponseSchema } from '../../http/route-definition';
 import { checkFood } from './check-food';
 import { checkLaminate } from './check-laminate';
 import { checkMaterial } from './check-material';
+import { checkPack } from './check-pack';
 import { checkTypedValues } from './check-typed-values';
 
+interface Checked<Spec> {
+  accountId: string;
+  spec: Spec;
+  base?: Spec;
+}
+
 /** What tells one collection from another; everything else is the same for all. */
-export interface CollectionDefinition<Spec> {
+export interface CollectionDefinition<Spec extends { name: string }> {
   collection: Collection;
   /** As the audit log and messages call one of them. */
   subjectKind: string;
@@ -44,12 +52,16 @@ export interface CollectionDefinition<Spec> {
   thingSchema: ResponseSchema;
   pageSchema: ResponseSchema;
   revisionPageSchema: ResponseSchema;
-  /** Refuses what the schema cannot see, with the path of the field below `spec`. */
-  check: (db: Queryable, accountId: string, spec: Spec) => Promise<void>;
+  /** Refuses what the schema cannot see, with the path of the field below `spec`. `base`: what is being revised. */
+  check: (db: Queryable, checked: Checked<Spec>) => Promise<void>;
 }
 
 const materialRevisionSchema = closedObject({
   ...revisionSchema(closedObject({})).fields,
+  spec: materialSpecSchema,
+});
+const namedMaterialRevisionSchema = closedObject({
+  ...namedRevisionSchema(closedObject({})).fields,
   spec: materialSpecSchema,
 });
 const materialThingSchema = closedObject({
@@ -65,8 +77,8 @@ export const MATERIALS: CollectionDefinition<MaterialSpec> = {
   reviseSchema: schemaOf(closedObject({ spec: materialSpecSchema, note: noteField('Note').optional() })),
   thingSchema: materialThingSchema,
   pageSchema: pageSchema(materialThingSchema),
-  revisionPageSchema: pageSchema(materialRevisionSchema),
-  check: async (_db, _accountId, spec) => checkMaterial(spec),
+  revisionPageSchema: pageSchema(namedMaterialRevisionSchema),
+  check: async (_db, { spec }) => checkMaterial(spec),
 };
 
 export const LAMINATES: CollectionDefinition<LaminateSpec> = {
@@ -77,10 +89,10 @@ export const LAMINATES: CollectionDefinition<LaminateSpec> = {
   reviseSchema: schemaOf(reviseRequestSchema(laminateSpecSchema)),
   thingSchema: keptThingSchema(laminateSpecSchema),
   pageSchema: pageSchema(keptThingSchema(laminateSpecSchema)),
-  revisionPageSchema: pageSchema(revisionSchema(laminateSpecSchema)),
-  async check(db, accountId, spec) {
-    checkTypedValues(spec);
-    await checkLaminate(db, accountId, spec);
+  revisionPageSchema: pageSchema(namedRevisionSchema(laminateSpecSchema)),
+  async check(db, checked) {
+    checkTypedValues(checked.spec);
+    await checkLaminate(db, checked);
   },
 };
 
@@ -92,8 +104,11 @@ export const PACKS: CollectionDefinition<PackSpec> = {
   reviseSchema: schemaOf(reviseRequestSchema(packSpecSchema)),
   thingSchema: keptThingSchema(packSpecSchema),
   pageSchema: pageSchema(keptThingSchema(packSpecSchema)),
-  revisionPageSchema: pageSchema(revisionSchema(packSpecSchema)),
-  check: async (_db, _accountId, spec) => checkTypedValues(spec),
+  revisionPageSchema: pageSchema(namedRevisionSchema(packSpecSchema)),
+  async check(db, checked) {
+    checkTypedValues(checked.spec);
+    await checkPack(db, checked);
+  },
 };
 
 export const FOODS: CollectionDefinition<FoodSpec> = {
@@ -104,8 +119,8 @@ export const FOODS: CollectionDefinition<FoodSpec> = {
   reviseSchema: schemaOf(reviseRequestSchema(foodSpecSchema)),
   thingSchema: keptThingSchema(foodSpecSchema),
   pageSchema: pageSchema(keptThingSchema(foodSpecSchema)),
-  revisionPageSchema: pageSchema(revisionSchema(foodSpecSchema)),
-  async check(_db, _accountId, spec) {
+  revisionPageSchema: pageSchema(namedRevisionSchema(foodSpecSchema)),
+  async check(_db, { spec }) {
     checkTypedValues(spec);
     checkFood(spec);
   },
@@ -119,6 +134,6 @@ export const ROUTES: CollectionDefinition<RouteSpec> = {
   reviseSchema: schemaOf(reviseRequestSchema(routeSpecSchema)),
   thingSchema: keptThingSchema(routeSpecSchema),
   pageSchema: pageSchema(keptThingSchema(routeSpecSchema)),
-  revisionPageSchema: pageSchema(revisionSchema(routeSpecSchema)),
-  check: async (_db, _accountId, spec) => checkTypedValues(spec),
+  revisionPageSchema: pageSchema(namedRevisionSchema(routeSpecSchema)),
+  check: async (_db, { spec }) => checkTypedValues(spec),
 };

@@ -4,13 +4,13 @@ import type { Actor, Answer } from '../../http/route-definition';
 import { recordAuditEntry } from '../audit/record-audit-entry';
 import type { CollectionDefinition } from './collections';
 
-export async function createThing<Spec>(
+export async function createThing<Spec extends { name: string }>(
   tx: Transaction,
   definition: CollectionDefinition<Spec>,
   { actor, spec }: { actor: Actor; spec: Spec },
 ): Promise<Answer> {
   const { accountId, userId } = actor;
-  await definition.check(tx, accountId, spec);
+  await definition.check(tx, { accountId, spec });
   const thing = await insertThing(tx, definition.tables, { accountId, spec, createdBy: userId });
   await recordAuditEntry(tx, {
     accountId,

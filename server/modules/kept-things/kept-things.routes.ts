@@ -1,11 +1,18 @@
-import { collectionPath } from '../../../shared/contract/kept-things';
-import { pageQuerySchema } from '../../../shared/contract/fields';
+import {
+  archiveRequestSchema,
+  collectionPath,
+  usesResponseSchema,
+  type ArchiveRequest,
+} from '../../../shared/contract/kept-things';
+import { keptListQuerySchema, pageQuerySchema } from '../../../shared/contract/fields';
 import type { Database } from '../../db/client';
 import { listRevisions, listThings } from '../../db/kept-thing-store';
 import { createOnce } from '../../http/create-once';
-import { accountRoute, type RouteDefinition } from '../../http/route-definition';
+import { accountRoute, schemaOf, type RouteDefinition } from '../../http/route-definition';
 import { FOODS, LAMINATES, MATERIALS, PACKS, ROUTES, type CollectionDefinition } from './collections';
+import { archiveThing } from './archive-thing';
 import { createThing } from './create-thing';
+import { findUses } from './find-uses';
 import { getThing } from './get-thing';
 import { reviseThing } from './revise-thing';
 
@@ -22,7 +29,10 @@ export function keptThingRoutes({ db }: { db: Database }): RouteDefinition[] {
   ];
 }
 
-function routesOf<Spec>(db: Database, definition: CollectionDefinition<Spec>): RouteDefinition[] {
+function routesOf<Spec extends { name: string }>(
+  db: Database,
+  definition: CollectionDefinition<Spec>,
+): RouteDefinition[] {
   const { collection, subjectKind, tables } = definition;
   const path = collectionPath(':account_id', collection);
   const onePath = `${path}/:id`;
@@ -30,9 +40,9 @@ function routesOf<Spec>(db: Database, definition: CollectionDefinition<Spec>): R
     accountRoute({
       method: 'get',
       path,
-      summary: `A page of ${collection}, newest first`,
+      summary: `A page of ${collection}, newest first, those in use or those archived`,
       roles: READERS,
-      querySchema: pageQuerySchema,
+      querySchema: keptListQuerySchema,
       responses: { 200: definition.pageSchema },
       handle: async ({ actor, query }) => ({
         status: 200,
@@ -77,6 +87,31 @@ function routesOf<Spec>(db: Database, definition: CollectionDefinition<Spec>): R
           spec: body.spec,
           note: body.note,
         }),
+    }),
+    accountRoute({
+      method: 'put',
+      path: `${onePath}/archived`,
+      summary: `Archive a ${subjectKind} or bring it back`,
+      roles: WRITERS,
+      requestSchema: schemaOf<ArchiveRequest>(archiveRequestSchema),
+      responses: { 200: definition.thingSchema },
+      async handle({ actor, params, body }) {
+        const archiving = { actor, id: params.id ?? '', isArchived: body.is_archived, subjectKind };
+        const thing = await db.transaction((tx) => archiveThing(tx, tables, archiving));
+        return { status: 200, body: thing, etag: thing.revision.id };
+      },
+    }),
+    accountRoute({
+      method: 'get',
+      path: `${onePath}/uses`,
+      summary: `What uses a ${subjectKind} now`,
+      roles: READERS,
+      responses: { 200: usesResponseSchema },
+      async handle({ actor: { accountId }, params }) {
+        const id = params.id ?? '';
+        await getThing(db, tables, { accountId, id });
+        return { status: 200, body: await findUses(db, { accountId, collection, id }) };
+      },
     }),
     accountRoute({
       method: 'get',

@@ -14,7 +14,7 @@ interface Revising<Spec> {
   note?: string;
 }
 
-export async function reviseThing<Spec>(
+export async function reviseThing<Spec extends { name: string }>(
   db: Database,
   definition: CollectionDefinition<Spec>,
   { actor, id, ifMatch, spec, note }: Revising<Spec>,
@@ -24,7 +24,7 @@ export async function reviseThing<Spec>(
     const base = await lockThing(tx, definition.tables, { accountId, id });
     if (!base) throw notFound();
     if (base.revision.id !== ifMatch) throw editedMeanwhile(base);
-    await definition.check(tx, accountId, spec);
+    await definition.check(tx, { accountId, spec, base: base.revision.spec });
     const thing = await insertRevision(tx, definition.tables, {
       accountId,
       spec,

@@ -16,7 +16,7 @@ export async function rerunStudy(
   const { accountId, userId } = actor;
   const study = await lockThing(tx, TABLES.studies, { accountId, id });
   if (!study) throw notFound();
-  const result = await runStudy(tx, engine, { actor, study });
+  const result = await runStudy(tx, engine, { actor, study, base: study.revision.spec });
   await recordAuditEntry(tx, {
     accountId,
     actorUserId: userId,

@@ -1,7 +1,11 @@
-import { and, desc, eq, inArray, lt, max, sql } from 'drizzle-orm';
+import { and, desc, eq, inArray, lt, max, ne, sql } from 'drizzle-orm';
 import type { Page } from '../../../shared/contract/kept-things';
-import { PAGE_SIZE } from '../../../shared/contract/rules';
-import type { StudyHeadline, StudyResult } from '../../../shared/contract/studies';
+import {
+  NEWER_KINDS,
+  type NewerThing,
+  type StudyHeadline,
+  type StudyResult,
+} from '../../../shared/contract/studies';
 import type { Queryable, Transaction } from '../../db/client';
 import {
   foods,
@@ -76,13 +80,16 @@ export async function findLatestResult(db: Queryable, studyId: string): Promise<
   return row ? asStudyResult(row) : null;
 }
 
+/** Results come whole, with their courses: fewer to a page than of other things. */
+const RESULTS_PER_PAGE = 10;
+
 export async function listResults(
   db: Queryable,
   {
     accountId,
     studyId,
     after,
-    limit = PAGE_SIZE,
+    limit = RESULTS_PER_PAGE,
   }: { accountId: string; studyId: string; after?: string; limit?: number },
 ): Promise<Page<StudyResult>> {
   const isAfter = after === undefined ? undefined : lt(results.id, after);
@@ -121,23 +128,50 @@ export async function findHeadlines(
   );
 }
 
-/** Those of the results that pin a revision which is no longer the current one. */
-export async function findOutdatedResults(db: Queryable, resultIds: readonly string[]): Promise<Set<string>> {
-  if (resultIds.length === 0) return new Set();
-  const currents = [materials, laminates, packs, foods, routes].map(
-    (table) => sql`SELECT ${table.id} AS thing_id, ${table.currentRevisionId} AS revision_id FROM ${table}`,
-  );
-  const rows = await db
-    .selectDistinct({ resultId: resultPins.resultId })
-    .from(resultPins)
-    .where(
-      and(
+export type NewerThan = Omit<NewerThing, 'laminates'> & { revisionId: string };
+
+const THINGS_BY_KIND = { material: materials, laminate: laminates, pack: packs, food: foods, route: routes };
+
+interface NewerRow extends Record<string, unknown> {
+  result_id: string;
+  kind_order: number;
+  id: string;
+  name: string;
+  revision_id: string;
+}
+
+/** By result: the things whose current revision is another than the one it pins. */
+export async function findNewerThings(
+  db: Queryable,
+  resultIds: readonly string[],
+): Promise<Map<string, NewerThan[]>> {
+  const newer = new Map<string, NewerThan[]>();
+  if (resultIds.length === 0) return newer;
+  const questions = NEWER_KINDS.map((kind, order) => {
+    const things = THINGS_BY_KIND[kind];
+    return sql`SELECT ${resultPins.resultId} AS result_id, ${order}::int AS kind_order, ${things.id} AS id,
+        ${things.name} AS name, ${things.currentRevisionId} AS revision_id
+      FROM ${resultPins} JOIN ${things} ON ${things.id} = ${resultPins.thingId}
+      WHERE ${and(
         inArray(resultPins.resultId, [...resultIds]),
-        sql`EXISTS (SELECT 1 FROM (${sql.join(currents, sql` UNION ALL `)}) AS current
-          WHERE current.thing_id = ${resultPins.thingId} AND current.revision_id <> ${resultPins.revisionId})`,
-      ),
-    );
-  return new Set(rows.map((row) => row.resultId));
+        eq(resultPins.collection, `${kind}s`),
+        ne(things.currentRevisionId, resultPins.revisionId),
+      )}`;
+  });
+  const rows = await db.execute<NewerRow>(
+    sql`${sql.join(questions, sql` UNION ALL `)} ORDER BY kind_order, id`,
+  );
+  for (const { result_id, kind_order, id, name, revision_id } of rows) {
+    const kind = NEWER_KINDS[kind_order];
+    if (kind) addNewer(newer, result_id, { kind, id, name, revisionId: revision_id });
+  }
+  return newer;
+}
+
+/** Two walls may pin two revisions of one material: it is newer once. */
+function addNewer(newer: Map<string, NewerThan[]>, resultId: string, thing: NewerThan) {
+  const known = newer.get(resultId) ?? [];
+  if (!known.some((one) => one.id === thing.id)) newer.set(resultId, [...known, thing]);
 }
 
 function asStudyResult(row: ResultRow): StudyResult {

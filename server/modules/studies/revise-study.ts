@@ -1,4 +1,5 @@
 import type { StudySpec } from '../../../shared/contract/studies';
+import { canonicalJson } from '../../db/canonical-json';
 import type { Database } from '../../db/client';
 import { insertRevision, lockThing } from '../../db/kept-thing-store';
 import { editedMeanwhile, notFound } from '../../http/app-error';
@@ -17,7 +18,10 @@ interface Revising {
   note?: string;
 }
 
-/** Keeps the new revision and its result, both or neither. */
+/**
+ * Keeps the new revision and its result, both or neither. What does not bear on the answer (name, notes, tags,
+ * verdicts) leaves the last result standing.
+ */
 export async function reviseStudy(
   { db, engine }: { db: Database; engine: EnginePort },
   { actor, id, ifMatch, spec, note }: Revising,
@@ -34,7 +38,9 @@ export async function reviseStudy(
       createdBy: userId,
       base,
     });
-    await runStudy(tx, engine, { actor, study });
+    if (!isSameQuestion(base.revision.spec, spec)) {
+      await runStudy(tx, engine, { actor, study, base: base.revision.spec });
+    }
     await recordAuditEntry(tx, {
       accountId,
       actorUserId: userId,
@@ -44,4 +50,10 @@ export async function reviseStudy(
     });
     return { status: 200, body: await withResult(tx, accountId, study), etag: study.revision.id };
   });
+}
+
+function isSameQuestion(one: StudySpec, other: StudySpec): boolean {
+  const questionOf = ({ food_id, pack_id, route_id, target_days, laminate_ids }: StudySpec) =>
+    canonicalJson({ food_id, pack_id, route_id, target_days, laminate_ids });
+  return questionOf(one) === questionOf(other);
 }

@@ -1,10 +1,12 @@
-import { closedObject, pageQuerySchema } from '../../../shared/contract/fields';
+import { closedObject, pageQuerySchema, studyListQuerySchema } from '../../../shared/contract/fields';
 import {
+  archiveRequestSchema,
   collectionPath,
   createRequestSchema,
+  namedRevisionSchema,
   pageSchema,
   reviseRequestSchema,
-  revisionSchema,
+  type ArchiveRequest,
 } from '../../../shared/contract/kept-things';
 import { studySpecSchema, type StudySpec } from '../../../shared/contract/studies';
 import {
@@ -14,13 +16,15 @@ import {
   studyWithResultSchema,
 } from '../../../shared/contract/study-answers';
 import type { Database } from '../../db/client';
-import { findThing, listRevisions, listThings } from '../../db/kept-thing-store';
+import { findThing, listRevisions } from '../../db/kept-thing-store';
 import { notFound } from '../../http/app-error';
 import { createOnce } from '../../http/create-once';
 import { accountRoute, schemaOf, type RouteDefinition } from '../../http/route-definition';
 import type { EnginePort } from '../../jobs/engine-workers';
+import { archiveThing } from '../kept-things/archive-thing';
 import { createStudy } from './create-study';
-import { describeStudies, getStudy } from './get-study';
+import { getStudy, withResult } from './get-study';
+import { listStudies } from './list-studies';
 import { rerunStudy } from './rerun-study';
 import { findResult, listResults } from './results.repository';
 import { reviseStudy } from './revise-study';
@@ -38,14 +42,14 @@ export function studyRoutes(deps: { db: Database; engine: EnginePort }): RouteDe
     accountRoute({
       method: 'get',
       path: PATH,
-      summary: 'A page of studies, newest first, each with its answer',
+      summary: 'A page of studies in the wanted order, each with its answer',
       roles: READERS,
-      querySchema: pageQuerySchema,
+      querySchema: studyListQuerySchema,
       responses: { 200: studyPageSchema },
-      async handle({ actor: { accountId }, query }) {
-        const page = await listThings(db, TABLES.studies, { accountId, ...query });
-        return { status: 200, body: { ...page, items: await describeStudies(db, accountId, page.items) } };
-      },
+      handle: async ({ actor: { accountId }, query }) => ({
+        status: 200,
+        body: await listStudies(db, { accountId, ...query }),
+      }),
     }),
     accountRoute({
       method: 'post',
@@ -81,12 +85,34 @@ export function studyRoutes(deps: { db: Database; engine: EnginePort }): RouteDe
         reviseStudy(deps, { actor, id: params.id ?? '', ifMatch, spec: body.spec, note: body.note }),
     }),
     accountRoute({
+      method: 'put',
+      path: `${PATH}/:id/archived`,
+      summary: 'Archive a study or bring it back',
+      roles: WRITERS,
+      requestSchema: schemaOf<ArchiveRequest>(archiveRequestSchema),
+      responses: { 200: studyWithResultSchema },
+      handle: ({ actor, params, body }) =>
+        db.transaction(async (tx) => {
+          const study = await archiveThing(tx, TABLES.studies, {
+            actor,
+            id: params.id ?? '',
+            isArchived: body.is_archived,
+            subjectKind: 'study',
+          });
+          return {
+            status: 200,
+            body: await withResult(tx, actor.accountId, study),
+            etag: study.revision.id,
+          };
+        }),
+    }),
+    accountRoute({
       method: 'get',
       path: `${PATH}/:id/revisions`,
       summary: 'The revisions of a study, newest first',
       roles: READERS,
       querySchema: pageQuerySchema,
-      responses: { 200: pageSchema(revisionSchema(studySpecSchema)) },
+      responses: { 200: pageSchema(namedRevisionSchema(studySpecSchema)) },
       async handle({ actor: { accountId }, params, query }) {
         const key = { accountId, id: params.id ?? '' };
         if (!(await findThing(db, TABLES.studies, key))) throw notFound();

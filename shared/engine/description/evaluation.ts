@@ -49,6 +49,8 @@ export interface StorageAnswer {
   shelf_life_days: number | null;
   absorber_exhausted_day?: number | null;
   courses?: CoursesAnswer;
+  /** How the integration ended: where it says 'step limit reached', what is "not reached" is not known. */
+  solver: SolverReport;
 }
 
 export interface WaterThroughWall {
@@ -152,5 +154,4 @@ export interface EvaluationAnswer extends StorageAnswer {
   /** Conductances of the pack as each leg begins. */
   pack: { leg: number; starts_day: number; oxygen: GasConductance; water: GasConductance }[];
   warnings: EngineWarning[];
-  solver: SolverReport;
 }

@@ -42,8 +42,19 @@ export const ABSORBER_CM3_STP: NumericRange = { min: 0, max: 1e9 };
 /** Above the saturation pressure of water at 60 °C, so that air always has oxygen in it. */
 export const TOTAL_PRESSURE_PA: NumericRange = { min: 20_000, max: 1e6 };
 export const LEG_DAYS: NumericRange = { min: 0, max: 36_500, isMinExcluded: true };
-export const HORIZON_DAYS: NumericRange = { min: 0, max: 36_500, isMinExcluded: true };
-export const TARGET_DAYS: NumericRange = { min: 0, max: 36_500, isMinExcluded: true };
+export const HORIZON_DAYS: NumericRange = { min: 0, max: 1_000_000, isMinExcluded: true };
+export const TARGET_DAYS: NumericRange = { min: 0, max: 1_000_000, isMinExcluded: true };
 export const UPTAKE_LIMIT_MG_PER_KG: NumericRange = { min: 0, max: 1e6, isMinExcluded: true };
 export const OXYGEN_FRACTION: NumericRange = { min: 0, max: 1, isMinExcluded: true };
 export const REPORT_DAY_COUNT: NumericRange = { min: 0, max: 10_000 };
+export const DIFFUSIVITY_M2_PER_S: NumericRange = { min: 1e-30, max: 1e-3 };
+/** D0 of D = D0·exp(−Q/(R·T)): far above any D, as Q may be large. */
+export const DIFFUSIVITY_PREFACTOR_M2_PER_S: NumericRange = { min: 1e-30, max: 1e30 };
+export const TRANSMISSION: NumericRange = { min: 0, max: 1 };
+export const GEOMETRIC_SD: NumericRange = { min: 1, max: 100 };
+export const RELATIVE_SD: NumericRange = { min: 0, max: 1 };
+export const TEMPERATURE_SD_K: NumericRange = { min: 0, max: 30 };
+export const HUMIDITY_SD: NumericRange = { min: 0, max: 0.5 };
+/** Draws are numbered by 32-bit whole numbers, and seeds are such. */
+export const DRAW_NUMBER: NumericRange = { min: 0, max: 0xffffffff };
+export const DRAW_COUNT: NumericRange = { min: 1, max: 1_000_000 };

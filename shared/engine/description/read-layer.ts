@@ -182,7 +182,7 @@ export function readCurve(value: unknown, path: string, referenceHumidity: numbe
 }
 
 /** Null where there are none, so that a density of 0 is a tight foil. */
-function readDefects(value: unknown, path: string): Defects | null {
+export function readDefects(value: unknown, path: string): Defects | null {
   if (value === undefined || value === null) return null;
   const defects = readObject<DefectsDescription>(value, path, 'Pinholes');
   const densityPerM2 = readNumber(defects.density_per_m2, `${path}.density_per_m2`, {

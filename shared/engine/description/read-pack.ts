@@ -43,6 +43,8 @@ export function readPack(value: unknown, path: string): Pack {
     walls: walls.map((wall, i) => readWall(wall, `${path}.walls[${i}]`)),
     headspaceM3: headspaceCm3 * 1e-6,
     startingOxygenFraction: startingPercent / 100,
+    oxygenFactor: 1,
+    waterFactor: 1,
     seal: readSeal(pack.seal, `${path}.seal`),
     leaks: readLeaks(pack.leaks, `${path}.leaks`),
   };

@@ -30,16 +30,20 @@ export function specFaults(schema: Validatable, spec: unknown): Record<string, s
 
 /** Faults as Formik keeps them: nested like the values. A group's own message gives way to those of its fields. */
 export function formikErrors<Values>(faults: Record<string, string>): FormikErrors<Values> {
-  const byDepth = Object.entries(faults).sort(([a], [b]) => depth(b) - depth(a));
+  const paths = Object.keys(faults);
   let errors: FormikErrors<Values> = {};
-  for (const [path, message] of byDepth) {
-    if (getIn(errors, path) === undefined) errors = setIn(errors, path, message) as FormikErrors<Values>;
+  for (const path of paths) {
+    const hasFaultWithin = paths.some(
+      (other) => other.startsWith(`${path}.`) || other.startsWith(`${path}[`),
+    );
+    if (!hasFaultWithin) errors = setIn(errors, path, faults[path]) as FormikErrors<Values>;
   }
   return errors;
 }
 
-function depth(path: string): number {
-  return path.split(/[.[]/).length;
+/** In the summary of a form two fields may share a label: 'Oxygen, value: …' says which one is meant. */
+export function faultWithin(group: string, message: string): string {
+  return `${group}, ${message.charAt(0).toLowerCase()}${message.slice(1)}`;
 }
 
 /**

@@ -9,7 +9,7 @@ import {
 } from '../../../shared/contract/materials';
 import { parseNumber, type DisplayKindName, type DisplayUnitSystem } from '../../../shared/units/format';
 import { FieldReader, fieldText } from '../../api/kept-forms/typed-quantity';
-import { formikErrors, specFaults } from '../../api/kept-forms/spec-faults';
+import { faultWithin, formikErrors, specFaults } from '../../api/kept-forms/spec-faults';
 import { inTypedUnits } from '../../api/kept-forms/validate-kept-form';
 import { computedGas, emptyGas, gasFormValues, statedFrom, type GasFormValues } from './gas-form-values';
 import type { Gas } from './unit-choice';
@@ -193,8 +193,19 @@ export function validateMaterialForm(context: MaterialFormContext) {
     }
     // The engine's word counts only where the schema has none on that field.
     for (const [path, message] of Object.entries(computing)) faults[materialFieldName(path)] ??= message;
+    for (const [path, message] of Object.entries(faults)) faults[path] = faultInWords(path, message);
     return formikErrors<MaterialFormValues>(faults);
   };
+}
+
+const GAS_WORDS: Record<Gas, string> = { oxygen: 'Oxygen', water: 'Water vapour' };
+/** The bound that a stated value in any unit has: nobody needs to read it. */
+const ASTRONOMIC_BOUND = / and at most 10{12,}/;
+
+function faultInWords(path: string, message: string): string {
+  const gas = GASES.find((name) => path.startsWith(`${name}.`));
+  const plain = message.replace(ASTRONOMIC_BOUND, '');
+  return gas === undefined ? plain : faultWithin(GAS_WORDS[gas], plain);
 }
 
 /** Who types values at humidities is not told about factors. */

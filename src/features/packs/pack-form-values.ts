@@ -1,4 +1,11 @@
-import { packSpecSchema, type AreaForm, type PackSpec, type PouchForm } from '../../../shared/contract/packs';
+import {
+  packSpecSchema,
+  type AreaForm,
+  type PackForm,
+  type PackSpec,
+  type PouchForm,
+  type TrayForm,
+} from '../../../shared/contract/packs';
 import type { DisplayKindName, DisplayUnitSystem } from '../../../shared/units/format';
 import { FieldReader, fieldText } from '../../api/kept-forms/typed-quantity';
 import { validateKeptForm } from '../../api/kept-forms/validate-kept-form';
@@ -8,7 +15,13 @@ type PouchLength = Exclude<keyof PouchForm, 'type'>;
 /** Every number as the text that stands in its field. */
 export interface PackFormValues {
   name: string;
-  form: Record<PouchLength, string> & { type: 'pouch' | 'area'; area_m2: string };
+  form: Record<PouchLength, string> & {
+    type: PackForm['type'];
+    area_m2: string;
+    tray_area_m2: string;
+    lid_area_m2: string;
+    tray_laminate_id: string;
+  };
   headspace_cm3: string;
   starting_headspace_oxygen_percent: string;
   has_seal_path: boolean;
@@ -39,6 +52,7 @@ export const NEW_PACK: PackSpec = {
 
 export function packFormValues(spec: PackSpec, unitSystem: DisplayUnitSystem): PackFormValues {
   const pouch = spec.form.type === 'pouch' ? spec.form : null;
+  const tray = spec.form.type === 'tray' ? spec.form : null;
   const length = (key: PouchLength) => fieldText(pouch?.[key], 'length_mm', unitSystem);
   return {
     name: spec.name,
@@ -52,6 +66,9 @@ export function packFormValues(spec: PackSpec, unitSystem: DisplayUnitSystem): P
       seal_bottom_mm: length('seal_bottom_mm'),
       gusset_depth_mm: length('gusset_depth_mm'),
       area_m2: spec.form.type === 'area' ? fieldText(spec.form.area_m2, 'area_m2', unitSystem) : '',
+      tray_area_m2: fieldText(tray?.tray_area_m2, 'area_m2', unitSystem),
+      lid_area_m2: fieldText(tray?.lid_area_m2, 'area_m2', unitSystem),
+      tray_laminate_id: tray?.tray_laminate_id ?? '',
     },
     headspace_cm3: fieldText(spec.headspace_cm3, 'volume_cm3', unitSystem),
     starting_headspace_oxygen_percent: fieldText(
@@ -79,7 +96,7 @@ export function packSpecFrom(values: PackFormValues, { unitSystem, before }: Pac
   const reader = new FieldReader(unitSystem);
   return {
     name: values.name.trim(),
-    form: values.form.type === 'pouch' ? pouchFrom(values, reader, before) : areaFrom(values, reader, before),
+    form: formFrom(values, reader, before),
     headspace_cm3: reader.readRequired('headspace_cm3', values.headspace_cm3, {
       kind: 'volume_cm3',
       before: before.headspace_cm3,
@@ -127,6 +144,24 @@ export function pouchFrom(
     seal_top_mm: length('seal_top_mm'),
     seal_bottom_mm: length('seal_bottom_mm'),
     gusset_depth_mm: length('gusset_depth_mm'),
+  };
+}
+
+function formFrom(values: PackFormValues, reader: FieldReader, before: PackSpec): PackForm {
+  if (values.form.type === 'area') return areaFrom(values, reader, before);
+  return values.form.type === 'tray' ? trayFrom(values, reader, before) : pouchFrom(values, reader, before);
+}
+
+/** The revision of the tray's wall is left open: each run of a study takes the newest. */
+function trayFrom(values: PackFormValues, reader: FieldReader, before: PackSpec): TrayForm {
+  const trayBefore = before.form.type === 'tray' ? before.form : null;
+  const area = (key: 'tray_area_m2' | 'lid_area_m2') =>
+    reader.readRequired(`form.${key}`, values.form[key], { kind: 'area_m2', before: trayBefore?.[key] });
+  return {
+    type: 'tray',
+    tray_area_m2: area('tray_area_m2'),
+    lid_area_m2: area('lid_area_m2'),
+    tray_laminate_id: values.form.tray_laminate_id,
   };
 }
 

@@ -1,10 +1,12 @@
+import { useQuery } from '@tanstack/react-query';
 import type { KeptThing } from '../../../shared/contract/kept-things';
 import type { PackSpec } from '../../../shared/contract/packs';
 import { specDifferences } from '../../api/kept-forms/spec-differences';
 import { fieldUnit } from '../../api/kept-forms/typed-quantity';
+import { keptThingsQueries } from '../../api/kept-things-queries';
 import { specFieldName, useKeptThingForm } from '../../api/kept-forms/use-kept-thing-form';
 import { hasRole, useAccount, useUnitSystem } from '../../session';
-import { Form, FormCheckbox, FormChoice, FormField, FormNumberField, Sheet } from '../../ui';
+import { Form, FormCheckbox, FormChoice, FormField, FormNumberField, FormSelect, Sheet } from '../../ui';
 import { FieldGrid } from '../../ui/field-grid';
 import { FormSaving } from '../../ui/form/form-saving';
 import { PackMeasures } from './components/pack-measures';
@@ -55,9 +57,12 @@ export function PackForm({ opened, returnTo, onTheirsTaken }: PackFormProps) {
               options={[
                 { value: 'pouch', label: 'Pouch dimensions' },
                 { value: 'area', label: 'An area' },
+                { value: 'tray', label: 'Tray and lid' },
               ]}
             />
-            {values.form.type === 'pouch' ? <PouchFields /> : <AreaField />}
+            {values.form.type === 'pouch' ? <PouchFields /> : null}
+            {values.form.type === 'area' ? <AreaField /> : null}
+            {values.form.type === 'tray' ? <TrayFields /> : null}
           </Sheet>
           {values.form.type === 'pouch' ? (
             <Sheet title="Outline">
@@ -118,6 +123,27 @@ function PouchFields() {
 function AreaField() {
   const unitSystem = useUnitSystem();
   return <FormNumberField name="form.area_m2" label="Area" unit={fieldUnit('area_m2', unitSystem)} />;
+}
+
+function TrayFields() {
+  const account = useAccount();
+  const unitSystem = useUnitSystem();
+  const walls = useQuery(keptThingsQueries(account.id, 'laminates').all());
+  const options = (walls.data ?? []).map(({ id, revision }) => ({ value: id, label: revision.spec.name }));
+  return (
+    <>
+      <FormSelect
+        name="form.tray_laminate_id"
+        label="Wall of the tray"
+        options={[{ value: '', label: 'Choose a wall' }, ...options]}
+        hint="The walls of a study are tried as the lid."
+      />
+      <FieldGrid>
+        <FormNumberField name="form.tray_area_m2" label="Tray area" unit={fieldUnit('area_m2', unitSystem)} />
+        <FormNumberField name="form.lid_area_m2" label="Lid area" unit={fieldUnit('area_m2', unitSystem)} />
+      </FieldGrid>
+    </>
+  );
 }
 
 function HeadspaceFields() {

@@ -13,5 +13,7 @@ export function pouchMeasures(form: PouchForm): PouchArea | null {
 
 /** m²; NaN where the dimensions make no pouch. */
 export function areaOfForm(form: PackSpec['form']): number {
-  return form.type === 'area' ? form.area_m2 : (pouchMeasures(form)?.area_m2 ?? NaN);
+  if (form.type === 'area') return form.area_m2;
+  if (form.type === 'tray') return form.tray_area_m2 + form.lid_area_m2;
+  return pouchMeasures(form)?.area_m2 ?? NaN;
 }

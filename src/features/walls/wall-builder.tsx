@@ -204,7 +204,10 @@ function BuilderBody(props: BuilderBodyProps) {
         />
       )}
       {isSideBySide || preview === null ? null : (
-        <PermeanceAnswers preview={preview} label="The answer now" />
+        <View style={{ gap: SPACE.x1 }}>
+          <PermeanceAnswers preview={preview} label="The answer now" />
+          <Small>Preview, worked out on this device as you change it.</Small>
+        </View>
       )}
       <View
         style={{
@@ -215,6 +218,8 @@ function BuilderBody(props: BuilderBodyProps) {
       >
         <View style={{ flex: isSideBySide ? 1 : undefined, minWidth: 0, gap: SPACE.x4 }}>
           <LayerList
+            // The material that was just made may come a moment later than the others; then the picker opens on it.
+            key={createdName ?? ''}
             edits={edits}
             book={book}
             layers={layers}

@@ -1,12 +1,6 @@
 import { mkdirSync } from 'node:fs';
 import path from 'node:path';
-import {
-  chromium,
-  type Browser,
-  type BrowserContextOptions,
-  type Locator,
-  type Page,
-} from 'playwright-core';
+import { chromium, type Browser, type BrowserContextOptions, type Locator, type Page } from 'playwright-core';
 import { expect, onTestFailed } from 'vitest';
 import { ROOT } from '../../harness/source-files';
 import { collectPageFaults, type PageFaults } from './page-faults';
@@ -67,6 +61,8 @@ async function openPage(browser: Browser, options: BrowserContextOptions): Promi
   };
   onTestFailed(async ({ task }) => {
     if (page.isClosed()) return;
+    // What went wrong on the page is most often why the journey found no way on.
+    for (const fault of faults.list()) console.error(fault);
     await screenshot(page, `failed-${task.id}`);
     await context.close();
   });
@@ -74,15 +70,17 @@ async function openPage(browser: Browser, options: BrowserContextOptions): Promi
   return { page, faults, press, close };
 }
 
-/** Kept in test-results/screenshots after the run, for people to look at. */
-export async function screenshot(page: Page, name: string, { isFullPage = true } = {}): Promise<void> {
+/**
+ * The whole page, kept in test-results/screenshots after the run for people to look at. The window is made as high as
+ * the page meanwhile: a bar that stays in sight would otherwise stand in its middle.
+ */
+export async function screenshot(page: Page, name: string): Promise<void> {
   const folder = path.join(ROOT, 'test-results', 'screenshots');
   mkdirSync(folder, { recursive: true });
-  // A bar that stays in sight would stand in the middle of a long page.
-  if (isFullPage) await page.evaluate(() => window.scrollTo(0, 0));
-  await page.screenshot({
-    path: path.join(folder, `${name}.png`),
-    fullPage: isFullPage,
-    animations: 'disabled',
-  });
+  const before = page.viewportSize();
+  const height = await page.evaluate(() => document.documentElement.scrollHeight);
+  if (before !== null)
+    await page.setViewportSize({ width: before.width, height: Math.max(before.height, height) });
+  await page.screenshot({ path: path.join(folder, `${name}.png`), animations: 'disabled' });
+  if (before !== null) await page.setViewportSize(before);
 }

@@ -1,4 +1,5 @@
 import type { Page } from 'playwright-core';
+import { shownText } from './fields';
 
 export interface ReadAnswer {
   sentence: string;
@@ -12,11 +13,11 @@ export interface ReadAnswer {
 export async function readAnswer(page: Page): Promise<ReadAnswer> {
   const limits = page.getByRole('list', { name: 'Limits' });
   await limits.waitFor();
-  const oxygen = await limits.getByRole('listitem').filter({ hasText: 'Oxygen taken up' }).innerText();
-  const moisture = await limits.getByRole('listitem').filter({ hasText: 'Moisture, at most' }).innerText();
-  const sentence = await page
-    .getByRole('heading', { level: 2, name: /^(Ends by|Keeps|Past its|No limit)/ })
-    .innerText();
+  const oxygen = await shownText(limits.getByRole('listitem').filter({ hasText: 'Oxygen taken up' }));
+  const moisture = await shownText(limits.getByRole('listitem').filter({ hasText: 'Moisture, at most' }));
+  const sentence = await shownText(
+    page.getByRole('heading', { level: 2, name: /^(Ends by|Keeps|Past its|No limit)/ }),
+  );
   const isOxygenFirst = oxygen.includes('comes first');
   if (isOxygenFirst === moisture.includes('comes first'))
     throw new Error(`One limit comes first, not: ${oxygen} | ${moisture}`);

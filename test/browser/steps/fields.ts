@@ -4,7 +4,9 @@ type Scope = Page | Locator;
 
 /** A field by its label, marked optional or not. */
 export function field(scope: Scope, label: string): Locator {
-  return scope.getByLabel(new RegExp(`^${escaped(label)}( · optional)?$`));
+  // A form may be called as its only field is.
+  const controls = scope.locator('input, select, textarea');
+  return scope.getByLabel(new RegExp(`^${escaped(label)}( · optional)?$`)).and(controls);
 }
 
 /** Types into each field, by label. */
@@ -15,6 +17,11 @@ export async function fillFields(scope: Scope, textByLabel: Record<string, strin
 /** A part of the page that has a heading. */
 export function sheet(page: Page, title: string): Locator {
   return page.getByRole('group', { name: title, exact: true });
+}
+
+/** What is read there, its no-break spaces as plain ones. */
+export async function shownText(place: Locator): Promise<string> {
+  return (await place.innerText()).replace(/\u00a0/g, ' ');
 }
 
 /** One of a few, all in sight. */

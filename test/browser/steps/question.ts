@@ -10,7 +10,10 @@ export async function openNewStudy(visit: JourneyPage): Promise<void> {
   await waitForTitle(visit, 'New study');
 }
 
-export async function followToNew(visit: JourneyPage, thing: 'food' | 'pack' | 'route' | 'wall'): Promise<void> {
+export async function followToNew(
+  visit: JourneyPage,
+  thing: 'food' | 'pack' | 'route' | 'wall',
+): Promise<void> {
   await visit.press(visit.page.getByRole('link', { name: `Make a new ${thing}` }));
   await waitForTitle(visit, `New ${thing}`);
 }

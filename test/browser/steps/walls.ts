@@ -1,6 +1,6 @@
 import type { Locator, Page } from 'playwright-core';
 import type { JourneyPage } from '../harness/browser';
-import { fillFields, sheet } from './fields';
+import { fillFields, sheet, shownText } from './fields';
 
 /** Takes a material at one of its usual gauges, through the picker. */
 export async function addLayer(
@@ -48,8 +48,8 @@ export async function setBothSides(page: Page, humidity: string): Promise<void> 
 
 /** The large figure: '1.97 cm³/(m²·day·atm)'. */
 export async function shownOxygenPermeance(page: Page): Promise<string> {
-  const text = await page.getByRole('group', { name: 'Under these conditions' }).innerText();
-  const found = /Oxygen permeance\s+([\d.,\s×⁻⁰¹²³⁴-⁹<]+?)\s+(cm³\S+)/.exec(text);
+  const text = await shownText(page.getByRole('group', { name: 'Under these conditions' }));
+  const found = /Oxygen permeance\s+(\S+)\s+(cm³\S+)/.exec(text);
   return found === null ? text : `${found[1]} ${found[2]}`;
 }
 
