@@ -135,6 +135,7 @@ const warningSchema = closedObject({
     .oneOf([
       'temperature_outside_measured',
       'temperature_range_unknown',
+      'activation_energy_missing',
       'humidity_beyond_curve',
       'below_measurable',
       'pinholes_are_estimated',

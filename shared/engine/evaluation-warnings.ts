@@ -1,4 +1,4 @@
-import { ZERO_CELSIUS_K } from '../units';
+import { GAS_CONSTANT, OXYGEN_MOLAR_MASS, ZERO_CELSIUS_K } from '../units';
 import type { EngineWarning, WallAnswer } from './description/evaluation';
 import { LIMIT_NAMES } from './description/read-storage';
 import type { LimitName } from './description/storage-description';
@@ -13,6 +13,9 @@ import { describeWall } from './wall-profile';
 
 /** A layer's oxygen permeance must change by more than this, turned round, to be worth a sentence. */
 const ORIENTATION_MATTERS_ABOVE = 0.01;
+
+/** Temperatures closer than this count as the reference itself. */
+const SAME_WITHIN_K = 1;
 
 const LIMIT_WORDS: Record<LimitName, string> = {
   oxygen_uptake_mg_per_kg: 'oxygen uptake',
@@ -58,8 +61,32 @@ function passedAtPacking(run: StorageRun, system: StorageSystem): EngineWarning[
   return LIMIT_NAMES.filter((name) => system.limits[name] !== undefined && at[name] === 0).map((name) => ({
     code: 'limit_passed_at_packing',
     path: `limits.${name}`,
-    message: `The limit on ${LIMIT_WORDS[name]} is already passed when the pack is closed.`,
+    message: `The limit on ${LIMIT_WORDS[name]} is already passed when the pack is closed.${atPacking(name, run, system)}`,
   }));
+}
+
+/** What is there at closing, beside the limit, and what would help. */
+function atPacking(
+  name: LimitName,
+  run: StorageRun,
+  { pack, food, totalPressurePa, limits }: StorageSystem,
+): string {
+  const starting = pack.startingOxygenFraction;
+  const shown = (value: number): string => String(Number(value.toPrecision(3)));
+  if (name === 'headspace_oxygen_percent') {
+    const limit = (100 * (limits.headspace_oxygen_percent ?? 0)) / totalPressurePa;
+    return ` The headspace begins at ${shown(100 * starting)} % oxygen, the limit is ${shown(limit)} %: flush to less, or use an absorber.`;
+  }
+  if (name !== 'oxygen_uptake_mg_per_kg' || starting === 0) return '';
+  const { temperatureK } = run.conditions[0];
+  const startingMol = (starting * totalPressurePa * pack.headspaceM3) / (GAS_CONSTANT * temperatureK);
+  const mgPerKg = (mol: number): number => (mol * OXYGEN_MOLAR_MASS * 1e6) / food.massKg;
+  const limitMol = limits.oxygen_uptake_mg_per_kg ?? 0;
+  return (
+    ` The headspace begins with ${shown(mgPerKg(startingMol))} mg of oxygen per kg of food, the limit is ` +
+    `${shown(mgPerKg(limitMol))} mg/kg: flush to below ${shown((100 * starting * limitMol) / startingMol)} % oxygen, ` +
+    'close over less headspace, or use an absorber.'
+  );
 }
 
 const celsius = (kelvin: number): string => `${Number((kelvin - ZERO_CELSIUS_K).toFixed(2))} °C`;
@@ -87,6 +114,21 @@ function temperatureWarning(
         message:
           `${words}: its activation energy was measured ${low}${high}`.trimEnd() +
           `; ${listed(beyond)} lies more than ${TRUSTED_BEYOND_K} K outside.`,
+      },
+    ];
+  }
+  if (gas.activationEnergyJPerMol === 0) {
+    const other = temperatures.filter(
+      (temperatureK) => Math.abs(temperatureK - gas.referenceK) > SAME_WITHIN_K,
+    );
+    if (other.length === 0) return [];
+    return [
+      {
+        code: 'activation_energy_missing',
+        path,
+        message:
+          `${words}: no activation energy is given, so its value at ${celsius(gas.referenceK)} is used unchanged ` +
+          `at ${listed(other)}.`,
       },
     ];
   }

@@ -19,7 +19,7 @@ export const RELATIVE_TOLERANCE = 1e-6;
  * What a step may leave open of that, against time and oxygen passed since day 0: little, as errors of thousands of
  * steps may add up; a coarse run takes few.
  */
-const STEP_SHARE = 5e-3;
+const STEP_SHARE = 2e-3;
 const COARSE_STEP_SHARE = 1e-1;
 /** From here on a run is coarse. */
 const COARSE = 1e-5;

@@ -126,8 +126,65 @@ describe('warnings', () => {
       ]),
     );
     expect(answer.shelf_life_days).toBe(0);
+    expect(answer.warnings.find(({ code }) => code === 'limit_passed_at_packing')?.message).toMatch(
+      /begins at 21 % oxygen, the limit is 2 %/,
+    );
     expect(new Set(answer.warnings.map((warning) => JSON.stringify(warning))).size).toBe(
       answer.warnings.length,
+    );
+  });
+});
+
+describe('warnings say', () => {
+  it('how much oxygen is in the pack when the limit is passed at closing, and what would do', () => {
+    // By hand: 20.9 % of 100 cm³ at 23 °C and 1 atm is 8.600e-4 mol, 27.5 mg; over 0.2 kg 138 mg/kg; 40/138 of 20.9 %.
+    const { warnings } = evaluate(
+      description({
+        pack: { headspace_cm3: 100, starting_headspace_oxygen_percent: 20.9 },
+        food: { oxygen_mode: 'at_once', mass_kg: 0.2 },
+        limits: { oxygen_uptake_mg_per_kg: 40 },
+      }),
+    );
+    expect(warnings.find(({ code }) => code === 'limit_passed_at_packing')?.message).toMatch(
+      /138 mg of oxygen per kg of food, the limit is 40 mg\/kg: flush to below 6.08 % oxygen/,
+    );
+  });
+
+  it('that a value without activation energy is used unchanged at another temperature', () => {
+    const plain = { ...polyester, oxygen: { ...polyester.oxygen, activation_energy_J_per_mol: 0 } };
+    const warm = evaluate(
+      description({
+        layers: [plain],
+        route: { legs: [{ temperature_C: 33, relative_humidity: 0.5, days: 10 }], after_last: 'hold' },
+      }),
+    );
+    expect(warm.warnings.find(({ code }) => code === 'activation_energy_missing')?.message).toMatch(
+      /23 °C .* at 33 °C/,
+    );
+    expect(codes(evaluate(description({ layers: [plain] })))).not.toContain('activation_energy_missing');
+  });
+
+  it('that a curve is left in a test, and that more passes where it rises', () => {
+    const short = {
+      ...vinylAlcohol,
+      oxygen: { ...vinylAlcohol.oxygen, humidity_curve: { relative_humidity: [0, 0.7], factor: [1, 2] } },
+    };
+    const { warnings } = evaluate(
+      description({
+        layers: [short],
+        tests: [
+          {
+            gas: 'oxygen',
+            temperature_C: 23,
+            relative_humidity_outside: 0.9,
+            relative_humidity_inside: 0.9,
+            oxygen_mole_fraction_dry: 1,
+          },
+        ],
+      }),
+    );
+    expect(warnings.find(({ code }) => code === 'humidity_beyond_curve')?.message).toMatch(
+      /in the tests the layer sees 90 %.*so more passes than is computed/,
     );
   });
 });

@@ -70,9 +70,9 @@ function specOf(material: LibraryMaterial): MaterialSpec {
     provenance: provenanceOf(material.provenance, library.sources),
   };
   const { pinholes } = material;
-  const defects = pinholes
-    ? { density_per_m2: pinholes.densityPerM2, diameter_um: pinholes.diameterUm }
-    : null;
+  const hasHoles = (pinholes?.densityPerM2 ?? 0) > 0;
+  const defects =
+    pinholes && hasHoles ? { density_per_m2: pinholes.densityPerM2, diameter_um: pinholes.diameterUm } : null;
   if (material.kind === 'foil') return { ...common, kind: 'foil', defects };
   if (!material.oxygen || !material.water)
     throw new Error(`${material.id}: a ${material.kind} needs both gases.`);

@@ -124,6 +124,7 @@ export interface EngineWarning {
   code:
     | 'temperature_outside_measured'
     | 'temperature_range_unknown'
+    | 'activation_energy_missing'
     | 'humidity_beyond_curve'
     | 'below_measurable'
     | 'pinholes_are_estimated'
