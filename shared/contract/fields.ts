@@ -125,11 +125,23 @@ export function closedObject<Shape extends yup.ObjectShape>(shape: Shape) {
     .strict();
 }
 
+/** Only as people write it: no '1e1', no '0x2', no two values. */
+function readWholeNumber(text: unknown): number {
+  return typeof text === 'string' && /^\d{1,9}$/.test(text) ? Number(text) : NaN;
+}
+
 /** A list page by key: what follows after the last id seen. */
 export const pageQuerySchema = yup
   .object({
     after: yup.string().matches(UUID, 'after: give the id that the previous page ended with.').optional(),
-    limit: yup.number().integer().min(1).max(200).optional(),
+    limit: yup
+      .number()
+      .transform((_value, original: unknown) => readWholeNumber(original))
+      .typeError('limit: use a whole number from 1 to 200.')
+      .integer()
+      .min(1, 'limit: use a whole number from 1 to 200.')
+      .max(200, 'limit: use a whole number from 1 to 200.')
+      .optional(),
   })
   .noUnknown();
 

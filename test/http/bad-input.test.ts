@@ -219,7 +219,22 @@ const BAD_SPECS: [
     1e-15,
   ],
   ['an energy that does not follow', 'materials', aFilm, 'oxygen.gas.activation_energy_J_per_mol', 50_000],
-  ['a rate for a film', 'materials', aFilm, 'oxygen.stated.unit', 'cm3(STP)/(m2*day)'],
+  [
+    'a permeance for a film without the gauge it was measured on',
+    'materials',
+    aFilm,
+    'oxygen.stated.unit',
+    'cm3(STP)/(m2*day*atm)',
+    'oxygen.stated.thickness_um',
+  ],
+  [
+    'a measured range upside down',
+    'materials',
+    aFilm,
+    'oxygen.stated.measured_temperature_min_C',
+    80,
+    'oxygen.gas.measured_temperature_min_C',
+  ],
   ['an unknown unit', 'materials', aFilm, 'water.stated.unit', 'furlong'],
   ['a rate without its test', 'materials', aFilm, 'water.stated.relative_humidity_high', undefined],
   ['an unknown class', 'materials', aFilm, 'material_class', 'wood'],
@@ -310,7 +325,7 @@ describe('whatever is sent', () => {
       for (const raw of raws) {
         const answer = await engineer.send('POST', path, { raw });
         expect(
-          [400, 401, 404, 429],
+          [400, 401, 404, 413, 429],
           `${path} ${raw.toString().slice(0, 40)}: ${answer.text.slice(0, 200)}`,
         ).toContain(answer.status);
         expect(answer.json.error.request_id).toBe(answer.headers.get('x-request-id'));

@@ -2,8 +2,10 @@ import type { MaterialSpec, StatedValue } from '../../../shared/contract/materia
 import {
   gasFromStated,
   InputError,
+  layerAt,
   type CoatingGasDescription,
   type FilmGasDescription,
+  type LayerDescription,
 } from '../../../shared/engine';
 import type { FieldFault } from '../../../shared/errors/error-code';
 import { inputInvalid } from '../../http/app-error';
@@ -14,9 +16,35 @@ const TOLERANCE = 1e-9;
 
 /** The SI coefficients must follow from the value as its source states it. */
 export function checkMaterial(spec: MaterialSpec): void {
-  if (spec.kind === 'foil') return;
-  const faults = (['oxygen', 'water'] as const).flatMap((gas) => faultsOfGas(spec, gas));
+  const faults =
+    spec.kind === 'foil' ? [] : (['oxygen', 'water'] as const).flatMap((gas) => faultsOfGas(spec, gas));
   if (faults.length > 0) throw inputInvalid(faults);
+  checkAsLayer(spec);
+}
+
+/** The engine must be able to compute with it, so that the fault is told here and not in some later study. */
+function checkAsLayer(spec: MaterialSpec): void {
+  try {
+    layerAt(asLayer(spec), { temperature_C: 23, relative_humidity: 0.5 });
+  } catch (error) {
+    if (!(error instanceof InputError)) throw error;
+    const field = error.path
+      .replace(/^layer\./, '')
+      .replace(/^(oxygen|water)\.(measured_|humidity_curve)/, '$1.stated.$2');
+    throw inputInvalid([{ path: `spec.${field}`, value: error.value, message: error.message }]);
+  }
+}
+
+/** Of 1 µm: any gauge does, and 1 µm leaves even a holed foil its metal. */
+function asLayer(spec: MaterialSpec): LayerDescription {
+  const common = { name: spec.name, thickness_um: 1 };
+  if (spec.kind === 'film') {
+    return { ...common, kind: 'film', oxygen: spec.oxygen.gas, water: spec.water.gas };
+  }
+  const defects = spec.defects ?? undefined;
+  return spec.kind === 'foil'
+    ? { ...common, kind: 'foil', defects }
+    : { ...common, kind: 'coating', oxygen: spec.oxygen.gas, water: spec.water.gas, defects };
 }
 
 function faultsOfGas(spec: Exclude<MaterialSpec, { kind: 'foil' }>, gas: Gas): FieldFault[] {

@@ -42,7 +42,7 @@ function faultOf(spec: object, path: string, typed: TypedValue): FieldFault | un
   });
   const stored = valueAt(spec, path);
   if (typeof stored !== 'number') return fault(`There is no number at ${path}.`);
-  const unit = UNIT_BY_ENDING.find(([ending]) => path.endsWith(ending))?.[1];
+  const unit = storedUnitAt(path);
   if (unit === undefined) return fault(`What is stored at ${path} has no other unit; leave it out here.`);
   let converted: number;
   try {
@@ -51,13 +51,24 @@ function faultOf(spec: object, path: string, typed: TypedValue): FieldFault | un
     if (error instanceof UnitError) return fault(error.message);
     throw error;
   }
-  const isSame = Math.abs(converted - stored) <= TOLERANCE * Math.max(Math.abs(stored), 1e-12);
+  // 32 °F is 0 °C but for rounding: a temperature is compared on the scale of a degree.
+  const floor = unit === 'C' ? 1 : 1e-12;
+  const isSame = Math.abs(converted - stored) <= TOLERANCE * Math.max(Math.abs(stored), floor);
   return isSame
     ? undefined
     : {
         ...fault(`${typed.value} ${typed.unit} is ${converted} ${unit}, not ${stored}.`),
         path: `spec.${path}`,
       };
+}
+
+/** `_mg_per_kg` is no `_kg`: a key that says "per" counts only where its whole ending is listed. */
+function storedUnitAt(path: string): string | undefined {
+  const found = UNIT_BY_ENDING.find(([ending]) => path.endsWith(ending));
+  if (found === undefined) return undefined;
+  const [ending, unit] = found;
+  const key = path.slice(path.lastIndexOf('.') + 1);
+  return key.includes('_per_') && !ending.includes('_per_') ? undefined : unit;
 }
 
 /** The value at a path such as `layers[0].thickness_um`; own keys only. */

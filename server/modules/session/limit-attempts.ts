@@ -1,4 +1,4 @@
-import { and, count, eq, gt, inArray, min, or } from 'drizzle-orm';
+import { and, count, eq, gt, min, or } from 'drizzle-orm';
 import type { Database } from '../../db/client';
 import { newId } from '../../db/new-id';
 import { attempts } from '../../db/schema';
@@ -37,20 +37,13 @@ export async function countAttempt(
 ): Promise<CountedAttempt> {
   const emailSha256 = sha256Hex(`email ${email.toLowerCase()}`);
   const networkSha256 = sha256Hex(`network ${networkAddress}`);
-  const emailAttemptId = newId();
   const networkAttemptId = newId();
   await db.insert(attempts).values([
-    { id: emailAttemptId, kind, subjectSha256: emailSha256 },
+    { id: newId(), kind, subjectSha256: emailSha256 },
     { id: networkAttemptId, kind, subjectSha256: networkSha256 },
   ]);
-  try {
-    await refuseBeyond(db, { kind, sha256: emailSha256, limit: LIMITS[kind].perEmail });
-    await refuseBeyond(db, { kind, sha256: networkSha256, limit: LIMITS[kind].perNetworkAddress });
-  } catch (error) {
-    // A refused attempt does not count: who keeps trying must not keep others, or themselves, out for longer.
-    await db.delete(attempts).where(inArray(attempts.id, [emailAttemptId, networkAttemptId]));
-    throw error;
-  }
+  await refuseBeyond(db, { kind, sha256: emailSha256, limit: LIMITS[kind].perEmail });
+  await refuseBeyond(db, { kind, sha256: networkSha256, limit: LIMITS[kind].perNetworkAddress });
   return { kind, emailSha256, networkAttemptId };
 }
 

@@ -1,4 +1,5 @@
 import type { EvaluationAnswer, EvaluationDescription } from '../../../shared/engine';
+import { AppError } from '../../http/app-error';
 import type { EnginePort } from '../../jobs/engine-workers';
 
 const COURSE_POINTS = 160;
@@ -14,6 +15,12 @@ export async function computeCandidate(
   description: EvaluationDescription,
 ): Promise<{ description: EvaluationDescription; answer: EvaluationAnswer }> {
   const first = await engine.evaluate({ ...description, tests: [] });
+  if (first.solver.status === 'step limit reached') {
+    throw new AppError(
+      'computation_too_long',
+      'This route is too long to be followed to its horizon. Give it fewer or longer legs, or a shorter horizon.',
+    );
+  }
   const withCourses = { ...description, report_days: reportDays(description, first) };
   return { description: withCourses, answer: await engine.evaluate(withCourses) };
 }

@@ -4,6 +4,7 @@ import { insertThing } from '../../db/kept-thing-store';
 import type { Actor, Answer } from '../../http/route-definition';
 import type { EnginePort } from '../../jobs/engine-workers';
 import { recordAuditEntry } from '../audit/record-audit-entry';
+import { checkTypedValues } from '../kept-things/check-typed-values';
 import { withResult } from './get-study';
 import { runStudy } from './run-study';
 import { TABLES } from './study-tables';
@@ -14,6 +15,7 @@ export async function createStudy(
   engine: EnginePort,
   { actor, spec }: { actor: Actor; spec: StudySpec },
 ): Promise<Answer> {
+  checkTypedValues(spec);
   const { accountId, userId } = actor;
   const study = await insertThing(tx, TABLES.studies, { accountId, spec, createdBy: userId });
   await runStudy(tx, engine, { actor, study });

@@ -1,6 +1,6 @@
 import type { FoodSpec } from '../../../shared/contract/foods';
 import type { Revision } from '../../../shared/contract/kept-things';
-import type { LaminateLayer, LaminateSpec } from '../../../shared/contract/laminates';
+import type { LaminateLayer } from '../../../shared/contract/laminates';
 import type { MaterialSpec } from '../../../shared/contract/materials';
 import type { PackSpec } from '../../../shared/contract/packs';
 import type { CandidateLayer } from '../../../shared/contract/studies';

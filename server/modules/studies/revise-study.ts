@@ -6,6 +6,7 @@ import { editedMeanwhile, notFound } from '../../http/app-error';
 import type { Actor, Answer } from '../../http/route-definition';
 import type { EnginePort } from '../../jobs/engine-workers';
 import { recordAuditEntry } from '../audit/record-audit-entry';
+import { checkTypedValues } from '../kept-things/check-typed-values';
 import { withResult } from './get-study';
 import { runStudy } from './run-study';
 import { TABLES } from './study-tables';
@@ -26,6 +27,7 @@ export async function reviseStudy(
   { db, engine }: { db: Database; engine: EnginePort },
   { actor, id, ifMatch, spec, note }: Revising,
 ): Promise<Answer> {
+  checkTypedValues(spec);
   const { accountId, userId } = actor;
   return db.transaction(async (tx) => {
     const base = await lockThing(tx, TABLES.studies, { accountId, id });
