@@ -83,9 +83,9 @@ function exponentOf(points: readonly { size: number; seconds: number }[]): numbe
 }
 
 function runPeer(): PeerReport {
-  const run = spawnSync('/usr/bin/python3', [path.join(BENCH, 'peer.py')], {
+  const oneThread = ['OMP_NUM_THREADS=1', 'OPENBLAS_NUM_THREADS=1'];
+  const run = spawnSync('/usr/bin/env', [...oneThread, '/usr/bin/python3', path.join(BENCH, 'peer.py')], {
     encoding: 'utf8',
-    env: { ...globalThis.process.env, OMP_NUM_THREADS: '1', OPENBLAS_NUM_THREADS: '1' },
   });
   if (run.status !== 0) {
     throw new Error(`The SciPy script did not end well (apt-get install python3-scipy):\n${run.stderr}`);
@@ -127,6 +127,9 @@ function drawsSeconds(count: number): number {
 
 const median = (values: number[]): number => values.sort((a, b) => a - b)[Math.floor(values.length / 2)];
 
+/** Without limits and with a report on the last day the whole route is followed, however small or large it is. */
+const TO_THE_END = { limits: {}, report_days: [730] };
+
 /** The study's wall, repeated to so many layers; the area grows with it, so that the food fares about the same. */
 function withLayers(count: number): StorageDescription {
   const layers = Array.from({ length: count }, (_, i) => studies.wall[i % studies.wall.length]);
@@ -134,6 +137,7 @@ function withLayers(count: number): StorageDescription {
   return {
     ...studies.route,
     pack: { ...pack, walls: [{ ...pack.walls[0], area_m2: (0.06 * count) / 7, layers }] },
+    ...TO_THE_END,
   };
 }
 
@@ -146,14 +150,17 @@ function withLegs(count: number): StorageDescription {
       legs: Array.from({ length: count }, (_, i) => ({ ...legs[i % legs.length], days: 730 / count })),
       after_last: 'hold',
     },
-    limits: {},
-    report_days: [730],
+    ...TO_THE_END,
   };
 }
 
 function measure(peer: PeerReport | null): BenchLine[] {
   const lines: BenchLine[] = [];
-  const add = (name: string, value: number, unit: string, other?: { peer: string; value: number }): void => {
+  const add = (
+    name: string,
+    [value, unit]: [number, string],
+    other?: { peer: string; value: number },
+  ): void => {
     lines.push({
       name,
       value,
@@ -167,33 +174,30 @@ function measure(peer: PeerReport | null): BenchLine[] {
   const wallUs = 1e6 * medianSeconds(one, { rounds: 400, batch: 50 });
   add(
     'steady seven-layer wall, two layers humidity-dependent',
-    wallUs,
-    'µs',
+    [wallUs, 'µs'],
     peer ? { peer: 'Python, one wall at a time', value: peer.single_wall_us } : undefined,
   );
   add(
     'the same, per wall of 1,000',
-    wallUs,
-    'µs',
+    [wallUs, 'µs'],
     peer ? { peer: 'NumPy over 1,000 walls at once', value: peer.batch_wall_us } : undefined,
   );
   add(
     'two-year, 24-leg coupled route with that wall, 1e-6',
-    1e3 * medianSeconds(() => void storage(studies.route), { rounds: 100, batch: 1 }),
-    'ms',
+    [1e3 * medianSeconds(() => void storage(studies.route), { rounds: 100, batch: 1 }), 'ms'],
     peer ? { peer: `SciPy solve_ivp, LSODA, rtol ${peer.route_rtol}`, value: peer.route_ms } : undefined,
   );
   drawsSeconds(500);
   add(
     '10,000 draws of a one-leg coupled study with that wall, 1e-4',
-    median([1, 2, 3].map(() => drawsSeconds(DRAWS))),
-    's',
+    [median([1, 2, 3].map(() => drawsSeconds(DRAWS))), 's'],
     peer ? { peer: `SciPy solve_ivp, LSODA, rtol ${peer.draws_rtol}`, value: peer.draws_s } : undefined,
   );
-  const scale = (name: string, sizes: number[], seconds: (size: number) => number, perMs: number): void => {
+  const scale = (name: string, sizes: number[], seconds: (size: number) => number): void => {
+    sizes.forEach(seconds);
     const points = sizes.map((size) => ({ size, seconds: seconds(size) }));
-    for (const point of points) add(`${name}: ${point.size}`, point.seconds * perMs, 'ms');
-    add(`${name}: exponent over a decade`, exponentOf(points), '1 is linear');
+    for (const point of points) add(`${name}: ${point.size}`, [point.seconds * 1e3, 'ms']);
+    add(`${name}: exponent over a decade`, [exponentOf(points), '1 is linear']);
   };
   const atSize =
     (build: (size: number) => StorageDescription) =>
@@ -201,19 +205,16 @@ function measure(peer: PeerReport | null): BenchLine[] {
       const study = build(size);
       return medianSeconds(() => void storage(study), { rounds: 40, batch: 1 });
     };
-  scale('route by layers', [5, 10, 20, 35, 50], atSize(withLayers), 1e3);
-  scale('route by legs', [24, 48, 96, 168, 240], atSize(withLegs), 1e3);
-  scale(
-    'study by draws',
-    [1_000, 2_000, 5_000, 10_000],
-    (size) => median([1, 2, 3].map(() => drawsSeconds(size))),
-    1e3,
+  scale('route by layers', [5, 10, 20, 35, 50], atSize(withLayers));
+  scale('route by legs', [24, 48, 96, 168, 240], atSize(withLegs));
+  scale('study by draws', [1_000, 2_000, 5_000, 10_000], (size) =>
+    median([1, 2, 3].map(() => drawsSeconds(size))),
   );
   return lines;
 }
 
 function show(lines: BenchLine[], peer: PeerReport | null): void {
-  const machine = `${cpus()[0]?.model ?? 'unknown processor'}, Node ${globalThis.process.version}`;
+  const machine = `${cpus()[0]?.model ?? 'unknown processor'}, Node ${process.version}`;
   process.stdout.write(`${machine}${peer ? `; ${peer.versions}` : ''}; medians, one core\n`);
   for (const { name, value, unit, peer: other, peerValue, ratio } of lines) {
     const beside =

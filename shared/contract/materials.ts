@@ -37,6 +37,8 @@ export const PROVENANCE_KINDS = [
 export const statedValueSchema = closedObject({
   value: quantity(RULES.statedValue),
   unit: yup.string().strict().required('Unit: choose one.').max(60),
+  /** Films stated as a rate or permeance: the gauge that was measured. Absent where the unit holds for any gauge. */
+  thickness_um: optionalQuantity({ ...RULES.gauge, label: 'Measured on' }),
   temperature_C: quantity({ ...RULES.temperature, label: 'Temperature of the value' }),
   /** Oxygen: on both sides. Water: the humidity at which the curve's factor equals its mean over the test. */
   relative_humidity: optionalQuantity({ ...RULES.relativeHumidity, label: 'Humidity of the value' }),

@@ -5,6 +5,7 @@ import {
   PERMEABILITY_SI,
   PERMEANCE_SI,
   REFERENCE_TEMPERATURE_C,
+  THICKNESS_UM,
 } from './description/ranges';
 import { readHumidity, readTemperatureK } from './description/read-conditions';
 import { readCurve } from './description/read-layer';
@@ -25,6 +26,8 @@ export interface StatedGas {
   value: number;
   /** A name of UNITS. */
   unit: string;
+  /** The gauge of the film that was measured: for a film stated in a unit that is not per thickness, and only then. */
+  thickness_um?: number;
   temperature_C: number;
   /**
    * Oxygen: the humidity on both sides, 0 if absent. Water: the humidity at which the curve's factor equals its mean
@@ -43,18 +46,29 @@ export interface StatedGas {
 }
 
 const SUITABLE: Record<StatedGas['gas'], Record<StatedGas['kind'], QuantityKind[]>> = {
-  oxygen: { film: ['gas permeability'], coating: ['gas permeance', 'gas transmission rate'] },
+  oxygen: {
+    film: ['gas permeability', 'gas transmission rate', 'gas permeance'],
+    coating: ['gas permeance', 'gas transmission rate'],
+  },
   water: {
-    film: ['water vapour transmission rate times thickness', 'water vapour permeability', 'gas permeability'],
+    film: [
+      'water vapour transmission rate times thickness',
+      'water vapour permeability',
+      'gas permeability',
+      'water vapour transmission rate',
+      'water vapour permeance',
+      'gas permeance',
+    ],
     coating: ['water vapour transmission rate', 'water vapour permeance', 'gas permeance'],
   },
 };
 
 /**
  * The gas block of a layer from a stated value: permeability [mol·m/(m²·s·Pa)] of a film, permeance [mol/(m²·s·Pa)] of
- * a coating. A rate is divided by the partial-pressure difference of its test.
- * Range: any unit of a suitable kind; rates −30 to 60 °C. Errors: InputError for a unit that cannot say it (a rate is no
- * permeability), for a rate without its test, and for values out of range. Cost: microseconds.
+ * a coating. A rate is divided by the partial-pressure difference of its test; what was measured on a film of one gauge
+ * is multiplied by that gauge.
+ * Range: any unit of a suitable kind; rates −30 to 60 °C. Errors: InputError for a unit that cannot say it, for a film's
+ * rate or permeance without the gauge it was measured on, for a rate without its test, and for values out of range. Cost: microseconds.
  */
 export function gasFromStated(stated: StatedGas & { kind: 'film' }): FilmGasDescription;
 export function gasFromStated(stated: StatedGas & { kind: 'coating' }): CoatingGasDescription;
@@ -78,7 +92,7 @@ export function gasFromStated(stated: StatedGas): FilmGasDescription | CoatingGa
   const inUnit = toSi(stated.value, stated.unit);
   const isInKg = unitKind.startsWith('water');
   const molar = isInKg ? inUnit / WATER_MOLAR_MASS : inUnit;
-  const si = molar / drivingPressure(stated, unitKind);
+  const si = (molar / drivingPressure(stated, unitKind)) * measuredThicknessM(stated, unitKind);
   const isFilm = layerKind === 'film';
   readNumber(si, 'value', {
     range: isFilm ? PERMEABILITY_SI : PERMEANCE_SI,
@@ -127,6 +141,33 @@ function suitableKind(stated: StatedGas, gas: StatedGas['gas'], layerKind: State
   return kind;
 }
 
+const PER_LAYER: readonly QuantityKind[] = [
+  'gas permeance',
+  'gas transmission rate',
+  'water vapour permeance',
+  'water vapour transmission rate',
+];
+
+/** What makes a film's permeance its permeability [m]; 1 where the unit already is times thickness, and for coatings. */
+function measuredThicknessM(stated: StatedGas, unitKind: QuantityKind): number {
+  if (stated.kind === 'film' && PER_LAYER.includes(unitKind)) {
+    const thicknessUm = readNumber(stated.thickness_um, 'thickness_um', {
+      range: THICKNESS_UM,
+      label: 'Gauge of the film that was measured',
+      unit: 'µm',
+    });
+    return toSi(thicknessUm, 'um');
+  }
+  if (stated.thickness_um === undefined) return 1;
+  throw new InputError(
+    'thickness_um',
+    stated.thickness_um,
+    stated.kind === 'film'
+      ? `${stated.unit} holds for any gauge; leave out the one that was measured.`
+      : 'A coating has one value for the whole of it; leave out the gauge that was measured.',
+  );
+}
+
 /** The partial-pressure difference [Pa] by which a rate is divided; 1 where the unit already is per pressure. */
 function drivingPressure(stated: StatedGas, unitKind: QuantityKind): number {
   if (unitKind === 'gas transmission rate') {
@@ -157,11 +198,7 @@ function testHumidities(stated: StatedGas): { high: number; low: number } {
   );
   const low = readHumidity(stated.relative_humidity_low, 'relative_humidity_low', 'Humidity of the dry side');
   if (!(high > low)) {
-    throw new InputError(
-      'relative_humidity_low',
-      low,
-      'The dry side must be drier than the moist side; exchange them.',
-    );
+    throw new InputError('relative_humidity_low', low, 'The dry side must be drier than the moist side.');
   }
   return { high, low };
 }

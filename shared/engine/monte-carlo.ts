@@ -11,7 +11,7 @@ import { readUncertainty, type UncertaintyDescription } from './uncertainty';
 import { VariableSystem } from './variable-system';
 
 /** Relative accuracy of a draw's days: far below the spread that draws are made for. */
-export const DRAW_TOLERANCE = 1e-4;
+const DRAW_TOLERANCE = 1e-4;
 
 export interface DrawRange {
   /** Whole number, 0 to 2³² − 1. */

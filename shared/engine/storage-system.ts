@@ -42,7 +42,7 @@ export interface StorageSystem {
 }
 
 /** Oxygen pressure of moist air outside [Pa]: 0.2095·(p_total − RH·p_sat). */
-export function oxygenInMoistAir(totalPressurePa: number, humidity: number, saturationPa: number): number {
+function oxygenInMoistAir(totalPressurePa: number, humidity: number, saturationPa: number): number {
   return OXYGEN_IN_DRY_AIR * (totalPressurePa - humidity * saturationPa);
 }
 

@@ -40,7 +40,7 @@ export function relativeFlux(tau: number): number {
 }
 
 /** D·t½/ℓ², the root of relativeFlux = ½ by halving, once; 1/7.20537. Older papers print 1/7.199. */
-export const HALF_TIME_TAU = ((): number => {
+const HALF_TIME_TAU = ((): number => {
   let low = 0.1;
   let high = 0.2;
   for (let halving = 0; halving < 60; halving++) {

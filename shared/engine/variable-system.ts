@@ -19,7 +19,7 @@ export type Input =
   | { kind: 'limit'; limit: LimitName }
   | { kind: 'leg_relative_humidity'; leg: number };
 
-export const INPUT_KINDS =
+const INPUT_KINDS =
   'wall_area:W, layer_thickness:W:L, layer_oxygen:W:L, layer_water:W:L, food_mass, limit:NAME, ' +
   'leg_relative_humidity:I and starting_headspace_oxygen';
 

@@ -189,7 +189,7 @@ export class WallAtTemperature {
     let flux = this.guess(span) * span;
     if (!(flux > lowFlux && flux < highFlux)) {
       flux = this.lastPermeance * span;
-      if (!(flux > lowFlux && flux < highFlux)) flux = Math.sqrt(lowFlux) * Math.sqrt(highFlux);
+      if (!(flux > lowFlux && flux < highFlux)) flux = this.fluxAtMiddle(driest, span);
     }
     for (let iteration = 0; iteration < 200; iteration++) {
       const total = this.walk(flux, driest, isDryInside);
@@ -216,6 +216,17 @@ export class WallAtTemperature {
     this.lastDriest = driest;
     this.lastSpan = span;
     return flux;
+  }
+
+  /** As if the whole wall lay at the middle of its humidities: where a search begins that has nothing to go by. */
+  private fluxAtMiddle(driest: number, span: number): number {
+    const middle = driest + span / 2;
+    let sum = 0;
+    for (let i = 0; i < this.count; i++) {
+      const curve = this.waterCurves[i];
+      sum += 1 / (this.ownWater[i] * (curve ? curve.at(middle) : 1) + this.holesWater[i]);
+    }
+    return span / sum;
   }
 
   /** Permeance to begin from: the last, or along the line through the last two where one face stood still. */

@@ -1,4 +1,4 @@
-import { ATMOSPHERE_PA, ZERO_CELSIUS_K } from '../units';
+import { ATMOSPHERE_PA } from '../units';
 import type { TransmissionTest, WallInTest } from './description/evaluation';
 import { InputError } from './description/input-error';
 import { OXYGEN_FRACTION } from './description/ranges';
@@ -99,7 +99,3 @@ export function testWall(layers: Layer[], test: TransmissionTest, path: string):
 export function wallInTest(layers: LayerDescription[], test: TransmissionTest): WallInTest {
   return testWall(readLayers(layers, 'layers'), test, 'test');
 }
-
-/** Temperature of a test in °C, as written. */
-export const testTemperatureC = (conditions: TestConditions): number =>
-  conditions.temperatureK - ZERO_CELSIUS_K;

@@ -18,7 +18,7 @@ export interface TimeCourseProps {
   reached: { day: number; value: number } | null;
   targetDays: number;
   lastDay: number;
-  legs: { days: number; label: string }[];
+  legDays: number[];
   afterLast: 'hold' | 'repeat';
   formatValue: (value: number) => string;
   formatDays: (days: number) => string;
@@ -48,7 +48,7 @@ function Plot(props: TimeCourseProps & { width: number }) {
     values: props.values,
     limits: limits.map((limit) => limit.value),
     lastDay,
-    legDays: props.legs.map((leg) => leg.days),
+    legDays: props.legDays,
     afterLast: props.afterLast,
     width: plotWidth,
     height: PLOT_PX,
@@ -68,12 +68,7 @@ function Plot(props: TimeCourseProps & { width: number }) {
             {index % 2 === 1 ? (
               <Rect x={leg.x} y={0} width={leg.width} height={PLOT_PX} fill={colors.lineFaint} />
             ) : null}
-            <LegLabel
-              x={leg.x}
-              width={leg.width}
-              label={props.legs[leg.leg]?.label ?? ''}
-              short={String(leg.leg + 1)}
-            />
+            <LegNumber x={leg.x} width={leg.width} number={leg.leg + 1} />
           </G>
         ))}
         {course.valueTicks.map((tick) => (
@@ -134,9 +129,10 @@ function Plot(props: TimeCourseProps & { width: number }) {
   );
 }
 
-function LegLabel({ x, width, label, short }: { x: number; width: number; label: string; short: string }) {
-  const text = monoWidth(label) < width - 4 ? label : monoWidth(short) < width - 2 ? short : '';
-  if (text === '') return null;
+/** Numbers only, so that wide and narrow legs read alike; what each leg is stands under the charts. */
+function LegNumber({ x, width, number }: { x: number; width: number; number: number }) {
+  const text = String(number);
+  if (monoWidth(text) >= width - 2) return null;
   return (
     <ChartText x={x + width / 2} y={-5} anchor="middle" tone="third">
       {text}

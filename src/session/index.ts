@@ -13,3 +13,4 @@ export {
 export type { Account } from './account';
 export { RoleGate } from './role-gate';
 export { useDraft, type Draft } from './use-draft';
+export { useFormDraft, useHasDraft, type FormDraft } from './use-form-draft';

@@ -70,7 +70,7 @@ export function Stepper({ label, value, onChange, onBlur, unit, step, error, id 
             onKeyDown={onKeyDown}
             onChange={(event) => onChange(event.target.value)}
             style={{
-              width: `${Math.max(4, value.length) + 1}ch`,
+              width: `calc(${Math.max(4, value.length) + 1}ch + ${SPACE.x1 + SPACE.x2}px)`,
               minHeight: ROW_MIN_PX,
               boxSizing: 'border-box',
               border: 0,

@@ -13,7 +13,6 @@ import {
 import { findCrossings, narrowCrossing } from '../../shared/engine/find-crossing';
 import { coatingOf, description, foil, polyester, polyethylene, vinylAlcohol } from './descriptions';
 
-const GAB = { type: 'GAB' as const, Xm_g_per_g: 0.055, C: 14, K: 0.86 };
 const LINEAR = { type: 'linear' as const, slope_g_per_g: 0.18, intercept_g_per_g: 0.005 };
 
 const moist = (more: Partial<StorageDescription> = {}): StorageDescription =>

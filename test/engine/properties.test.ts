@@ -1,4 +1,4 @@
-import fc from 'fast-check';
+import * as fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { storage, wallState, type LayerDescription } from '../../shared/engine';
 import { convert, UNITS, unitsOfKind, type UnitName } from '../../shared/units';

@@ -1,4 +1,4 @@
-import fc from 'fast-check';
+import * as fc from 'fast-check';
 import type { FilmDescription, LayerDescription } from '../../shared/engine';
 import { coatingOf } from './descriptions';
 

@@ -1,4 +1,4 @@
-import fc from 'fast-check';
+import * as fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import {
   layerAt,
@@ -12,7 +12,6 @@ import { polyester, polyethylene, vinylAlcohol } from './descriptions';
 import { conditions, decades, film, humidity, layers, near, number, plainLayers } from './property-inputs';
 
 const RUNS = { numRuns: 1000 };
-const SLOW = 120_000;
 
 const thicker = (layer: LayerDescription, factor: number): LayerDescription =>
   layer.kind === 'film' ? { ...layer, thickness_um: layer.thickness_um * factor } : layer;

@@ -38,7 +38,7 @@ export const LIMIT_NAMES: readonly LimitName[] = [
 ];
 
 /** A repeated route may begin this many legs within its horizon. */
-export const MOST_LEGS_BEGUN = 100_000;
+const MOST_LEGS_BEGUN = 100_000;
 
 /** Amount of oxygen [mol] that is so many mg per kg of food. */
 export const uptakeMol = (mgPerKg: number, massKg: number): number =>

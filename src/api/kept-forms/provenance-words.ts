@@ -5,7 +5,7 @@ export type ProvenanceKind = ProvenanceEntry['kind'];
 const KIND_WORDS: Record<ProvenanceKind, string> = {
   published: 'read at the source',
   memory: 'from memory',
-  'common-practice': 'usage of the trade',
+  'common-practice': 'common practice',
   derived: 'worked out from a source',
   invented: 'invented for the demo',
   'supplier statement': 'stated by the supplier',

@@ -41,6 +41,11 @@ export function formikErrors<Values>(faults: Record<string, string>): FormikErro
   return errors;
 }
 
+/** 'Horizon: …' as 'Look ahead: …', where the field is called that on the page. Whole sentences stay. */
+export function relabelled(message: string, label: string | undefined): string {
+  return label === undefined ? message : message.replace(/^[^:“.]+:/, `${label}:`);
+}
+
 /** In the summary of a form two fields may share a label: 'Oxygen, value: …' says which one is meant. */
 export function faultWithin(group: string, message: string): string {
   return `${group}, ${message.charAt(0).toLowerCase()}${message.slice(1)}`;

@@ -13,6 +13,8 @@ export interface KeptThingFormOptions<Name extends Collection> {
   collection: Name;
   opened: KeptThing<SpecByCollection[Name]> | null;
   returnTo: string | undefined;
+  /** What was left unsaved: the revision it was typed on, and how to drop it once it is saved or given up. */
+  draft: { baseRevisionId: string | null; clear: () => void };
 }
 
 export interface KeptThingFormState<Spec> {
@@ -26,6 +28,8 @@ export interface KeptThingFormState<Spec> {
   fault: ErrorWords | null;
   /** 'Saved as revision 3.' until the next change. */
   said: string;
+  /** What the next save is built on. */
+  baseRevisionId: () => string | null;
 }
 
 /** A path of the request's body as a path of the form. */
@@ -38,17 +42,18 @@ export function useKeptThingForm<Name extends Collection>(
   options: KeptThingFormOptions<Name>,
 ): KeptThingFormState<SpecByCollection[Name]> {
   type Spec = SpecByCollection[Name];
-  const { accountId, basePath, collection, opened, returnTo } = options;
+  const { accountId, basePath, collection, opened, returnTo, draft } = options;
   const router = useRouter();
   const saver = useKeptThingSaver(
     { accountId, collection },
-    opened === null ? null : { id: opened.id, revisionId: opened.revision.id },
+    opened === null ? null : { id: opened.id, revisionId: draft.baseRevisionId ?? opened.revision.id },
   );
   const [said, setSaid] = useState('');
   const [fault, setFault] = useState<ErrorWords | null>(null);
 
   const finish = (saved: KeptThing<Spec> | null) => {
     if (saved === null) return;
+    draft.clear();
     if (saved.id === opened?.id) {
       setSaid(`Saved as revision ${saved.revision.number}.`);
       return;
@@ -73,10 +78,12 @@ export function useKeptThingForm<Name extends Collection>(
     takeTheirs: () => {
       const theirs = saver.conflict;
       saver.acceptTheirs();
+      draft.clear();
       return theirs;
     },
     isSaving: saver.isSaving,
     fault,
     said,
+    baseRevisionId: saver.baseRevisionId,
   };
 }

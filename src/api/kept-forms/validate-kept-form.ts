@@ -6,7 +6,7 @@ import {
   type DisplayKindName,
   type DisplayUnitSystem,
 } from '../../../shared/units/format';
-import { boundsAt, faultAsTyped, formikErrors, specFaults } from './spec-faults';
+import { boundsAt, faultAsTyped, formikErrors, relabelled, specFaults } from './spec-faults';
 
 export interface KeptFormRules<Values> {
   schema: yup.ISchema<unknown> & {
@@ -17,6 +17,8 @@ export interface KeptFormRules<Values> {
   /** What the number at a path measures; null for text. */
   kindAt: (path: string) => DisplayKindName | null;
   unitSystem: DisplayUnitSystem;
+  /** What stands above the field at a path, where the schema calls it otherwise. */
+  labelAt?: (path: string) => string | undefined;
 }
 
 /** Formik's `validate` by the contract's own schema, its messages put in the units that were typed. */
@@ -25,7 +27,8 @@ export function validateKeptForm<Values extends object>(rules: KeptFormRules<Val
     const spec = rules.toSpec(values);
     const faults = specFaults(rules.schema, spec);
     for (const [path, message] of Object.entries(faults)) {
-      faults[path] = inTypedUnits({ path, message, spec, text: getIn(values, path) }, rules);
+      const typed = inTypedUnits({ path, message, spec, text: getIn(values, path) }, rules);
+      faults[path] = relabelled(typed, rules.labelAt?.(path));
     }
     return formikErrors<Values>(faults);
   };

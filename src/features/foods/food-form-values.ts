@@ -272,9 +272,20 @@ export function validateFoodForm(context: FoodFormContext) {
     schema: foodSpecSchema,
     toSpec: (values) => foodSpecFrom(values, context),
     kindAt: (path) => KIND_BY_FIELD[path.split('.').at(-1) ?? ''] ?? null,
+    labelAt: (path) => LABELS[path],
     unitSystem: context.unitSystem,
   });
 }
+
+/** Fields that the page calls otherwise than the contract does. */
+const LABELS: Partial<Record<string, string>> = {
+  'food.mass_kg': 'Mass as packed',
+  'food.rate_reference_temperature_C': 'Holds at',
+  'food.isotherm.intercept_g_per_g': 'Moisture at activity 0',
+  'limits.oxygen_uptake_mg_per_kg': 'Oxygen taken up',
+  'limits.headspace_oxygen_percent': 'Oxygen in the headspace',
+  absorber_capacity_cm3_STP: 'Oxygen absorber in the pack',
+};
 
 const KIND_BY_FIELD: Partial<Record<string, DisplayKindName>> = {
   mass_kg: 'mass_kg',

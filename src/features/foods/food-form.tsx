@@ -6,10 +6,12 @@ import { specDifferences } from '../../api/kept-forms/spec-differences';
 import { fieldUnit } from '../../api/kept-forms/typed-quantity';
 import { specFieldName, useKeptThingForm } from '../../api/kept-forms/use-kept-thing-form';
 import type { FoodSpec } from '../../api/kept-things-queries';
-import { hasRole, useAccount, useUnitSystem } from '../../session';
+import { hasRole, useAccount, useFormDraft, useUnitSystem } from '../../session';
 import { Form, FormChoice, FormField, FormNumberField, FormSelect, Notice, Sheet, Small } from '../../ui';
 import { FieldGrid } from '../../ui/field-grid';
+import { FormDraft } from '../../ui/form/form-draft';
 import { FormSaving } from '../../ui/form/form-saving';
+import { ReadingOnly } from '../../ui/form/reading-only';
 import { IsothermDrawing } from './components/isotherm-drawing';
 import {
   foodFormValues,
@@ -30,23 +32,40 @@ export function FoodForm({ opened, returnTo, onTheirsTaken }: FoodFormProps) {
   const account = useAccount();
   const unitSystem = useUnitSystem();
   const context = { unitSystem, before: opened?.revision.spec ?? NEW_FOOD };
+  const draft = useFormDraft(`foods/${opened?.id ?? 'new'}`, {
+    values: foodFormValues(context.before, unitSystem),
+    baseRevisionId: opened?.revision.id ?? null,
+  });
+  const canSave = hasRole(account, ['engineer']);
   const keeping = useKeptThingForm({
     accountId: account.id,
     basePath: account.basePath,
     collection: 'foods',
     opened,
     returnTo,
+    draft,
   });
   const toSpec = (values: FoodFormValues) => foodSpecFrom(values, context);
   const { conflict } = keeping;
   return (
     <Form<FoodFormValues>
       label="Food"
-      initialValues={foodFormValues(context.before, unitSystem)}
+      initialValues={draft.start}
       validate={validateFoodForm(context)}
       toFieldName={specFieldName}
       onSubmit={(values) => keeping.submit(toSpec(values))}
     >
+      {canSave ? (
+        <FormDraft
+          isRestored={draft.isRestored}
+          isNew={opened === null}
+          fresh={draft.fresh}
+          onChange={(values: FoodFormValues) => draft.keep(values, keeping.baseRevisionId())}
+          onDropped={draft.clear}
+        />
+      ) : (
+        <ReadingOnly what="foods" hasFields />
+      )}
       <Sheet title="Food">
         <FormField name="name" label="Name" />
         <FormNumberField name="food.mass_kg" label="Mass as packed" unit={fieldUnit('mass_kg', unitSystem)} />
@@ -71,7 +90,7 @@ export function FoodForm({ opened, returnTo, onTheirsTaken }: FoodFormProps) {
       </Sheet>
       <FormSaving<FoodFormValues>
         submitLabel={opened === null ? 'Save food' : 'Save as a new revision'}
-        refusal={hasRole(account, ['engineer']) ? undefined : 'Saving foods is for engineers.'}
+        canSave={canSave}
         said={keeping.said}
         fault={keeping.fault}
         conflict={

@@ -4,9 +4,10 @@ import { useState } from 'react';
 import { isApiError } from '../../api/api-error';
 import { describeError } from '../../api/describe-error';
 import { keptThingsQueries } from '../../api/kept-things-queries';
-import { useAccount } from '../../session';
+import { hasRole, useAccount } from '../../session';
 import { Screen } from '../../ui';
 import { FetchedScreen } from '../../ui/fetched-screen';
+import { ReadingOnly } from '../../ui/form/reading-only';
 import { FoodForm } from './food-form';
 
 /** A new food. */
@@ -15,7 +16,11 @@ export function NewFoodScreen() {
   const { return: returnTo } = useLocalSearchParams<{ return?: string }>();
   return (
     <Screen title="New food" back={{ href: `${account.basePath}/foods`, label: 'Foods' }}>
-      <FoodForm opened={null} returnTo={returnTo} onTheirsTaken={() => undefined} />
+      {hasRole(account, ['engineer']) ? (
+        <FoodForm opened={null} returnTo={returnTo} onTheirsTaken={() => undefined} />
+      ) : (
+        <ReadingOnly what="foods" />
+      )}
     </Screen>
   );
 }

@@ -32,7 +32,7 @@ function People({ accountId }: { accountId: string }) {
   return (
     <Sheet
       title="People"
-      subtitle="Engineers and admins take one seat each; suppliers and clients are guests."
+      subtitle="Engineers and admins take one seat each; suppliers and clients are guests. This page only shows who is in the account; nothing can be changed here."
       action={<Figure value={String(seatsInUse)} unit={seatsInUse === 1 ? 'seat' : 'seats'} size="title" />}
     >
       <DataTable

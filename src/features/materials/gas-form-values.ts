@@ -5,10 +5,10 @@ import {
   type CoatingGasDescription,
   type FilmGasDescription,
 } from '../../../shared/engine';
-import { parseNumber, type DisplayUnitSystem } from '../../../shared/units/format';
+import { parseNumber, type DisplayKindName, type DisplayUnitSystem } from '../../../shared/units/format';
 import { FieldReader, fieldText } from '../../api/kept-forms/typed-quantity';
 import { factorAt, factorsFromValues, valuesFromFactors, type CurvePoint } from './humidity-curve-values';
-import { isRate, isSuitableUnit, usualUnit, type Gas, type LayerKind } from './unit-choice';
+import { isRate, isSuitableUnit, needsGauge, usualUnit, type Gas, type LayerKind } from './unit-choice';
 
 export type CurveMode = 'none' | 'values' | 'factors';
 
@@ -24,6 +24,8 @@ export interface GasFormValues {
   stated: {
     value: string;
     unit: string;
+    /** The gauge that was measured, where the unit does not hold for any. */
+    thickness_um: string;
     temperature_C: string;
     relative_humidity: string;
     relative_humidity_high: string;
@@ -47,8 +49,10 @@ export function emptyGas(gas: Gas, kind: LayerKind, unitSystem: DisplayUnitSyste
     stated: {
       value: '',
       unit: usualUnit(gas, kind, unitSystem),
+      thickness_um: '',
       temperature_C: celsius(isOxygen ? 23 : 38),
-      relative_humidity: isOxygen ? '0' : '',
+      // Nobody's value is dry until somebody says so.
+      relative_humidity: '',
       relative_humidity_high: isOxygen ? '' : '90',
       relative_humidity_low: isOxygen ? '' : '0',
       oxygen_mole_fraction_dry: '100',
@@ -84,6 +88,7 @@ export function gasFormValues(
     stated: {
       value: String(stated.value),
       unit: stated.unit,
+      thickness_um: fieldText(stated.thickness_um, 'thickness_um', unitSystem),
       temperature_C: celsius(stated.temperature_C),
       relative_humidity: percent(stated.relative_humidity),
       relative_humidity_high: percent(stated.relative_humidity_high) || empty.stated.relative_humidity_high,
@@ -125,11 +130,14 @@ export interface GasReading {
 }
 
 /** What the form states, with its units turned into those of the contract. */
-export function statedFrom(values: GasFormValues, { gas, unitSystem, before }: GasReading): StatedValue {
+export function statedFrom(
+  values: GasFormValues,
+  { gas, kind, unitSystem, before }: GasReading,
+): StatedValue {
   const reader = new FieldReader(unitSystem);
   const { stated } = values;
-  const read = (name: keyof GasFormValues['stated'], kind: Parameters<FieldReader['read']>[2]['kind']) =>
-    reader.read(name, stated[name], { kind, before: before?.[name as keyof NumbersOfStated] });
+  const read = (name: keyof GasFormValues['stated'], shownKind: DisplayKindName) =>
+    reader.read(name, stated[name], { kind: shownKind, before: before?.[name as keyof NumbersOfStated] });
   const isWaterRate = gas === 'water' && isRate(gas, stated.unit);
   const isOxygenRate = gas === 'oxygen' && isRate(gas, stated.unit);
   const value = parseNumber(stated.value);
@@ -137,6 +145,9 @@ export function statedFrom(values: GasFormValues, { gas, unitSystem, before }: G
   return present({
     value,
     unit: stated.unit,
+    thickness_um: needsGauge(gas, kind, stated.unit)
+      ? (read('thickness_um', 'thickness_um') ?? NaN)
+      : undefined,
     temperature_C: read('temperature_C', 'temperature_C') ?? NaN,
     relative_humidity: read('relative_humidity', 'fraction_as_percent'),
     relative_humidity_high: isWaterRate

@@ -73,6 +73,68 @@ describe('the material form', () => {
     });
   });
 
+  it('takes a film as its data sheet prints it, measured on 12 µm', () => {
+    const asPrinted = evoh((values) => {
+      values.oxygen = {
+        ...values.oxygen,
+        curve_mode: 'none',
+        curve: [],
+        stated: {
+          ...values.oxygen.stated,
+          value: '120',
+          unit: 'cm3(STP)/(m2*day)',
+          thickness_um: '12',
+          relative_humidity: '0',
+        },
+      };
+      values.water.stated = {
+        ...values.water.stated,
+        value: '8',
+        unit: 'g/(m2*day)',
+        thickness_um: '12',
+      };
+    });
+    expect(validateMaterialForm(context)(asPrinted)).toEqual({});
+    const spec = materialSpecFrom(asPrinted, context) as FilmMaterialSpec;
+    expect(spec.oxygen.stated).toMatchObject({ value: 120, thickness_um: 12, relative_humidity: 0 });
+    expect(spec.oxygen.gas.permeability_mol_m_per_m2_s_Pa / 1440).toBeCloseTo(5.09625e-21, 25);
+    expect(materialFormValues({ unitSystem: 'metric', before: spec }).water.stated.thickness_um).toBe('12');
+
+    asPrinted.oxygen.stated.thickness_um = '';
+    expect(validateMaterialForm(context)(asPrinted).oxygen?.stated).toEqual({
+      thickness_um: 'Oxygen, measured on: enter a number, more than 0 and at most 2000 µm.',
+    });
+  });
+
+  it('asks a new material at which humidity its oxygen value was measured', () => {
+    const errors = validateMaterialForm(context)(
+      evoh((values) => (values.oxygen.stated.relative_humidity = '')),
+    );
+    expect(errors.oxygen?.stated).toMatchObject({
+      relative_humidity: expect.stringContaining('both sides at: enter the humidity') as string,
+    });
+    expect(materialFormValues(context).oxygen.stated.relative_humidity).toBe('');
+  });
+
+  it('names each field as the page does, and says what to do', () => {
+    const errors = validateMaterialForm(context)(
+      evoh((values) => {
+        values.oxygen.stated.value = '';
+        values.oxygen.stated.temperature_C = '';
+        values.water.stated.value = '0';
+        values.water.stated.relative_humidity_low = '90';
+      }),
+    );
+    expect(errors.oxygen?.stated).toEqual({
+      value: 'Oxygen value: enter a number above 0.',
+      temperature_C: 'Oxygen, measured at: enter a number, -30 to 60 °C.',
+    });
+    expect(errors.water?.stated).toEqual({
+      value: 'Water value: 0 does not fit; use a number above 0.',
+      relative_humidity_low: 'The dry side must be drier than the moist side.',
+    });
+  });
+
   it('reads gauges with a decimal comma as well', () => {
     expect(gaugesFrom('12; 15, 23 6,3')).toEqual([12, 15, 23, 6.3]);
   });

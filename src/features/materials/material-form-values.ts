@@ -9,9 +9,10 @@ import {
 } from '../../../shared/contract/materials';
 import { parseNumber, type DisplayKindName, type DisplayUnitSystem } from '../../../shared/units/format';
 import { FieldReader, fieldText } from '../../api/kept-forms/typed-quantity';
-import { faultWithin, formikErrors, specFaults } from '../../api/kept-forms/spec-faults';
+import { formikErrors, specFaults } from '../../api/kept-forms/spec-faults';
 import { inTypedUnits } from '../../api/kept-forms/validate-kept-form';
 import { computedGas, emptyGas, gasFormValues, statedFrom, type GasFormValues } from './gas-form-values';
+import { faultInWords } from './material-field-labels';
 import type { Gas } from './unit-choice';
 
 export interface MaterialFormValues {
@@ -104,6 +105,15 @@ export function readMaterial(values: MaterialFormValues, context: MaterialFormCo
     const stated = statedFrom(values[gas], { gas, kind, unitSystem, before: keptBefore?.stated });
     const computed = computedGas(stated, { gas, kind });
     if ('fault' in computed) faults[`${gas}.stated.${computed.fault.field}`] = computed.fault.message;
+    // The engine stops at the first fault; these two are said in any case.
+    const { relative_humidity_high: high, relative_humidity_low: low } = stated;
+    if (high !== undefined && low !== undefined && low >= high)
+      faults[`${gas}.stated.relative_humidity_low`] = 'The dry side must be drier than the moist side.';
+    const isOldWithoutHumidity =
+      keptBefore !== undefined && keptBefore.stated.relative_humidity === undefined;
+    if (gas === 'oxygen' && stated.relative_humidity === undefined && !isOldWithoutHumidity)
+      faults[`${gas}.stated.relative_humidity`] =
+        'Both sides at: enter the humidity of the test, 0 to 100 %; 0 only where it was dry.';
     const spread = number(`${gas}.geometric_sd`, values[gas].geometric_sd, keptBefore?.geometric_sd);
     return {
       stated,
@@ -140,6 +150,7 @@ const ENTRY_OF_PART: { part: keyof StatedValue; entry: RegExp }[] = [
   { part: 'humidity_curve', entry: /humidity_?curve/i },
   { part: 'measured_temperature_min_C', entry: /measured/i },
   { part: 'measured_temperature_max_C', entry: /measured/i },
+  { part: 'thickness_um', entry: /conditions/i },
   { part: 'temperature_C', entry: /conditions/i },
   { part: 'relative_humidity', entry: /conditions/i },
   { part: 'relative_humidity_high', entry: /conditions/i },
@@ -193,19 +204,9 @@ export function validateMaterialForm(context: MaterialFormContext) {
     }
     // The engine's word counts only where the schema has none on that field.
     for (const [path, message] of Object.entries(computing)) faults[materialFieldName(path)] ??= message;
-    for (const [path, message] of Object.entries(faults)) faults[path] = faultInWords(path, message);
+    for (const [path, message] of Object.entries(faults)) faults[path] = faultInWords(path, message, values);
     return formikErrors<MaterialFormValues>(faults);
   };
-}
-
-const GAS_WORDS: Record<Gas, string> = { oxygen: 'Oxygen', water: 'Water vapour' };
-/** The bound that a stated value in any unit has: nobody needs to read it. */
-const ASTRONOMIC_BOUND = / and at most 10{12,}/;
-
-function faultInWords(path: string, message: string): string {
-  const gas = GASES.find((name) => path.startsWith(`${name}.`));
-  const plain = message.replace(ASTRONOMIC_BOUND, '');
-  return gas === undefined ? plain : faultWithin(GAS_WORDS[gas], plain);
 }
 
 /** Who types values at humidities is not told about factors. */
@@ -241,6 +242,7 @@ function textAt(values: MaterialFormValues, field: string): unknown {
 
 function kindOfMaterialField(path: string): DisplayKindName | null {
   if (/temperature_(min_|max_)?C$/.test(path)) return 'temperature_C';
+  if (path.endsWith('thickness_um')) return 'thickness_um';
   if (/relative_humidity/.test(path)) return 'fraction_as_percent';
   if (path.endsWith('oxygen_mole_fraction_dry')) return 'fraction_as_percent';
   if (path.endsWith('activation_energy_J_per_mol')) return 'energy_J_per_mol';

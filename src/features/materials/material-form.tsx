@@ -3,9 +3,10 @@ import type { KeptThing } from '../../../shared/contract/kept-things';
 import { MATERIAL_CLASSES, type MaterialKind, type MaterialSpec } from '../../../shared/contract/materials';
 import { specDifferences } from '../../api/kept-forms/spec-differences';
 import { useKeptThingForm } from '../../api/kept-forms/use-kept-thing-form';
-import { hasRole, useAccount, useUnitSystem } from '../../session';
+import { hasRole, useAccount, useFormDraft, useUnitSystem } from '../../session';
 import { Choice, Form, FormCheckbox, FormField, FormNumberField, FormSelect, Sheet } from '../../ui';
 import { FieldGrid } from '../../ui/field-grid';
+import { FormDraft } from '../../ui/form/form-draft';
 import { FormSaving } from '../../ui/form/form-saving';
 import { GasFields } from './components/gas-fields';
 import {
@@ -29,23 +30,38 @@ export function MaterialForm({ opened, returnTo, onTheirsTaken }: MaterialFormPr
   const account = useAccount();
   const unitSystem = useUnitSystem();
   const context = { unitSystem, before: opened?.revision.spec ?? null };
+  const draft = useFormDraft(`materials/${opened?.id ?? 'new'}`, {
+    values: materialFormValues(context),
+    baseRevisionId: opened?.revision.id ?? null,
+  });
+  const canSave = hasRole(account, ['engineer']);
   const keeping = useKeptThingForm({
     accountId: account.id,
     basePath: account.basePath,
     collection: 'materials',
     opened,
     returnTo,
+    draft,
   });
   const toSpec = (values: MaterialFormValues) => materialSpecFrom(values, context);
   const { conflict } = keeping;
   return (
     <Form<MaterialFormValues>
       label="Material"
-      initialValues={materialFormValues(context)}
+      initialValues={draft.start}
       validate={validateMaterialForm(context)}
       toFieldName={materialFieldName}
       onSubmit={(values) => keeping.submit(toSpec(values))}
     >
+      {canSave ? (
+        <FormDraft
+          isRestored={draft.isRestored}
+          isNew={opened === null}
+          fresh={draft.fresh}
+          onChange={(values: MaterialFormValues) => draft.keep(values, keeping.baseRevisionId())}
+          onDropped={draft.clear}
+        />
+      ) : null}
       <Sheet title="Material">
         <FormField name="name" label="Name" />
         <FormSelect
@@ -70,7 +86,7 @@ export function MaterialForm({ opened, returnTo, onTheirsTaken }: MaterialFormPr
           />
         </FieldGrid>
       </Sheet>
-      <GasSheets />
+      <GasSheets isHumidityOptional={keptWithoutHumidity(context.before)} />
       <DefectFields />
       <Sheet title="Besides">
         <FieldGrid>
@@ -97,7 +113,7 @@ export function MaterialForm({ opened, returnTo, onTheirsTaken }: MaterialFormPr
       </Sheet>
       <FormSaving<MaterialFormValues>
         submitLabel={opened === null ? 'Save material' : 'Save as a new revision'}
-        refusal={hasRole(account, ['engineer']) ? undefined : 'Saving materials is for engineers.'}
+        canSave={canSave}
         said={keeping.said}
         fault={keeping.fault}
         conflict={
@@ -160,13 +176,18 @@ function KindChoice() {
   );
 }
 
-function GasSheets() {
+/** What was kept before anybody asked for the humidity stays as it is. */
+function keptWithoutHumidity(before: MaterialSpec | null): boolean {
+  return before !== null && before.kind !== 'foil' && before.oxygen.stated.relative_humidity === undefined;
+}
+
+function GasSheets({ isHumidityOptional }: { isHumidityOptional: boolean }) {
   const { values } = useFormikContext<MaterialFormValues>();
   if (values.kind === 'foil') return null;
   return (
     <>
-      <GasFields gas="oxygen" kind={values.kind} />
-      <GasFields gas="water" kind={values.kind} />
+      <GasFields gas="oxygen" kind={values.kind} isHumidityOptional={isHumidityOptional} />
+      <GasFields gas="water" kind={values.kind} isHumidityOptional={isHumidityOptional} />
     </>
   );
 }

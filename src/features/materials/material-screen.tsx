@@ -4,9 +4,10 @@ import { useState } from 'react';
 import { isApiError } from '../../api/api-error';
 import { describeError } from '../../api/describe-error';
 import { keptThingsQueries } from '../../api/kept-things-queries';
-import { useAccount } from '../../session';
+import { hasRole, useAccount, useHasDraft } from '../../session';
 import { Disclosure, Screen } from '../../ui';
 import { FetchedScreen } from '../../ui/fetched-screen';
+import { ReadingOnly } from '../../ui/form/reading-only';
 import { MaterialFacts } from './components/material-facts';
 import { MaterialRevisions } from './components/material-revisions';
 import { MaterialForm } from './material-form';
@@ -17,7 +18,11 @@ export function NewMaterialScreen() {
   const { return: returnTo } = useLocalSearchParams<{ return?: string }>();
   return (
     <Screen title="New material" back={{ href: `${account.basePath}/materials`, label: 'Materials' }}>
-      <MaterialForm opened={null} returnTo={returnTo} onTheirsTaken={() => undefined} />
+      {hasRole(account, ['engineer']) ? (
+        <MaterialForm opened={null} returnTo={returnTo} onTheirsTaken={() => undefined} />
+      ) : (
+        <ReadingOnly what="materials" />
+      )}
     </Screen>
   );
 }
@@ -27,6 +32,7 @@ export function MaterialScreen() {
   const account = useAccount();
   const { material: id } = useLocalSearchParams<{ material: string }>();
   const material = useQuery(keptThingsQueries(account.id, 'materials').one(id));
+  const hasDraft = useHasDraft(`materials/${id}`);
   const [timesTaken, setTimesTaken] = useState(0);
   const back = { href: `${account.basePath}/materials`, label: 'Materials' };
   return (
@@ -43,16 +49,19 @@ export function MaterialScreen() {
           subtitle={`${opened.revision.spec.material_class}, ${opened.revision.spec.kind}; revision ${opened.revision.number}`}
           back={back}
         >
+          {hasRole(account, ['engineer']) ? null : <ReadingOnly what="materials" />}
           <MaterialFacts spec={opened.revision.spec} />
           <MaterialRevisions materialId={opened.id} />
-          <Disclosure label="Change it: a new revision">
-            <MaterialForm
-              key={`${opened.id} ${timesTaken}`}
-              opened={opened}
-              returnTo={undefined}
-              onTheirsTaken={() => setTimesTaken(timesTaken + 1)}
-            />
-          </Disclosure>
+          {hasRole(account, ['engineer']) ? (
+            <Disclosure key={opened.id} label="Change it: a new revision" isOpenAtFirst={hasDraft}>
+              <MaterialForm
+                key={`${opened.id} ${timesTaken}`}
+                opened={opened}
+                returnTo={undefined}
+                onTheirsTaken={() => setTimesTaken(timesTaken + 1)}
+              />
+            </Disclosure>
+          ) : null}
         </Screen>
       )}
     </FetchedScreen>

@@ -10,6 +10,7 @@ import { keptThingsQueries, type KeptMaterial } from '../../api/kept-things-quer
 import { hasRole, useAccount, useUnitSystem } from '../../session';
 import { Inline, LinkButton, Row, Screen, Select, Small, Stack } from '../../ui';
 import { FetchedList } from '../../ui/fetched-list';
+import { conditionsInShort } from './conditions-in-words';
 import { coefficientInWords } from './si-words';
 
 /** All materials of the account, searched and filtered by class. */
@@ -106,8 +107,11 @@ function Coefficients({ spec, unitSystem }: { spec: MaterialSpec; unitSystem: Di
   if (spec.kind === 'foil') return <Small>Only its pinholes let anything through.</Small>;
   return (
     <View>
-      <Small tone="oxygen">{`oxygen ${coefficientInWords('oxygen', spec.oxygen.gas, unitSystem)}`}</Small>
-      <Small tone="water">{`water ${coefficientInWords('water', spec.water.gas, unitSystem)}`}</Small>
+      {(['oxygen', 'water'] as const).map((gas) => (
+        <Small key={gas} tone={gas}>
+          {`${gas} ${coefficientInWords(gas, spec[gas].gas, unitSystem)} at ${conditionsInShort(gas, spec[gas].stated, unitSystem)}`}
+        </Small>
+      ))}
     </View>
   );
 }

@@ -6,9 +6,17 @@ export type LayerKind = 'film' | 'coating';
 
 /** Kinds of quantity that say how a gas passes a film (per thickness) or a whole coating. */
 const SUITABLE: Record<Gas, Record<LayerKind, QuantityKind[]>> = {
-  oxygen: { film: ['gas permeability'], coating: ['gas permeance', 'gas transmission rate'] },
+  oxygen: {
+    film: ['gas permeability', 'gas transmission rate', 'gas permeance'],
+    coating: ['gas permeance', 'gas transmission rate'],
+  },
   water: {
-    film: ['water vapour transmission rate times thickness', 'water vapour permeability'],
+    film: [
+      'water vapour transmission rate times thickness',
+      'water vapour permeability',
+      'water vapour transmission rate',
+      'water vapour permeance',
+    ],
     coating: ['water vapour transmission rate', 'water vapour permeance'],
   },
 };
@@ -61,6 +69,11 @@ export function unitInPrint(unit: string): string {
     .replace(/(\d+)um/g, '$1 µm')
     .replace(/um/g, 'µm')
     .replace(/\*/g, '·');
+}
+
+/** Whether a film's value in this unit holds only for the gauge that was measured, so that the gauge must be told. */
+export function needsGauge(gas: Gas, kind: LayerKind, unit: string): boolean {
+  return kind === 'film' && isSuitableUnit(gas, 'coating', unit);
 }
 
 /** Whether a unit is a rate in a test, so that the test's two sides must be told. */

@@ -181,9 +181,20 @@ export function validatePackForm(context: PackFormContext) {
     schema: packSpecSchema,
     toSpec: (values) => packSpecFrom(values, context),
     kindAt: kindOfPackField,
+    labelAt: (path) => LABELS[path],
     unitSystem: context.unitSystem,
   });
 }
+
+/** Fields that the page calls otherwise than the contract does. */
+const LABELS: Partial<Record<string, string>> = {
+  'form.gusset_depth_mm': 'Gusset, folded depth',
+  'form.tray_laminate_id': 'Wall of the tray',
+  starting_headspace_oxygen_percent: 'Oxygen in it at the start',
+  'leaks.count': 'How many',
+  'leaks.length_mm': 'Length',
+  'leaks.diameter_um': 'Diameter',
+};
 
 function kindOfPackField(path: string): DisplayKindName | null {
   if (path === 'leaks.count' || path === 'leaks.diameter_um') return 'number';

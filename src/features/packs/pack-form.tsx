@@ -5,10 +5,12 @@ import { specDifferences } from '../../api/kept-forms/spec-differences';
 import { fieldUnit } from '../../api/kept-forms/typed-quantity';
 import { keptThingsQueries } from '../../api/kept-things-queries';
 import { specFieldName, useKeptThingForm } from '../../api/kept-forms/use-kept-thing-form';
-import { hasRole, useAccount, useUnitSystem } from '../../session';
+import { hasRole, useAccount, useFormDraft, useUnitSystem } from '../../session';
 import { Form, FormCheckbox, FormChoice, FormField, FormNumberField, FormSelect, Sheet } from '../../ui';
 import { FieldGrid } from '../../ui/field-grid';
+import { FormDraft } from '../../ui/form/form-draft';
 import { FormSaving } from '../../ui/form/form-saving';
+import { ReadingOnly } from '../../ui/form/reading-only';
 import { PackMeasures } from './components/pack-measures';
 import {
   NEW_PACK,
@@ -30,25 +32,42 @@ export function PackForm({ opened, returnTo, onTheirsTaken }: PackFormProps) {
   const account = useAccount();
   const unitSystem = useUnitSystem();
   const context = { unitSystem, before: opened?.revision.spec ?? NEW_PACK };
+  const draft = useFormDraft(`packs/${opened?.id ?? 'new'}`, {
+    values: packFormValues(context.before, unitSystem),
+    baseRevisionId: opened?.revision.id ?? null,
+  });
+  const canSave = hasRole(account, ['engineer']);
   const keeping = useKeptThingForm({
     accountId: account.id,
     basePath: account.basePath,
     collection: 'packs',
     opened,
     returnTo,
+    draft,
   });
   const toSpec = (values: PackFormValues) => packSpecFrom(values, context);
   const { conflict } = keeping;
   return (
     <Form<PackFormValues>
       label="Pack"
-      initialValues={packFormValues(context.before, unitSystem)}
+      initialValues={draft.start}
       validate={validatePackForm(context)}
       toFieldName={specFieldName}
       onSubmit={(values) => keeping.submit(toSpec(values))}
     >
       {({ values }) => (
         <>
+          {canSave ? (
+            <FormDraft
+              isRestored={draft.isRestored}
+              isNew={opened === null}
+              fresh={draft.fresh}
+              onChange={(values: PackFormValues) => draft.keep(values, keeping.baseRevisionId())}
+              onDropped={draft.clear}
+            />
+          ) : (
+            <ReadingOnly what="packs" hasFields />
+          )}
           <Sheet title="Pack">
             <FormField name="name" label="Name" />
             <FormChoice
@@ -73,7 +92,7 @@ export function PackForm({ opened, returnTo, onTheirsTaken }: PackFormProps) {
           <LeakFields hasLeaks={values.has_leaks} isPouch={values.form.type === 'pouch'} />
           <FormSaving<PackFormValues>
             submitLabel={opened === null ? 'Save pack' : 'Save as a new revision'}
-            refusal={hasRole(account, ['engineer']) ? undefined : 'Saving packs is for engineers.'}
+            canSave={canSave}
             said={keeping.said}
             fault={keeping.fault}
             conflict={

@@ -115,6 +115,7 @@ export function validateRouteForm(context: RouteFormContext) {
     schema: routeSpecSchema,
     toSpec: (values) => routeSpecFrom(values, context),
     kindAt: kindOfRouteField,
+    labelAt: labelOfRouteField,
     unitSystem: context.unitSystem,
   });
 }
@@ -124,3 +125,17 @@ function kindOfRouteField(path: string): DisplayKindName | null {
   if (path.endsWith('relative_humidity')) return 'fraction_as_percent';
   return path.endsWith('days') ? 'days' : null;
 }
+
+/** As the page calls it, and which leg where each has such a field. */
+function labelOfRouteField(path: string): string | undefined {
+  if (path === 'horizon_days') return 'Look ahead';
+  const leg = /^route\.legs\[(\d+)\]\.(\w+)$/.exec(path);
+  const words = LEG_LABELS[leg?.[2] ?? ''];
+  return leg === null || words === undefined ? undefined : `Leg ${Number(leg[1]) + 1}, ${words}`;
+}
+
+const LEG_LABELS: Partial<Record<string, string>> = {
+  temperature_C: 'temperature',
+  relative_humidity: 'humidity',
+  days: 'days',
+};

@@ -6,7 +6,7 @@ import type { RouteSpec } from '../../../shared/contract/routes';
 import { provenanceFieldInWords, provenanceInWords } from '../../api/kept-forms/provenance-words';
 import { specDifferences } from '../../api/kept-forms/spec-differences';
 import { specFieldName, useKeptThingForm } from '../../api/kept-forms/use-kept-thing-form';
-import { hasRole, useAccount, useUnitSystem } from '../../session';
+import { hasRole, useAccount, useFormDraft, useUnitSystem } from '../../session';
 import {
   Button,
   Form,
@@ -19,7 +19,9 @@ import {
   Small,
   SPACE,
 } from '../../ui';
+import { FormDraft } from '../../ui/form/form-draft';
 import { FormSaving } from '../../ui/form/form-saving';
+import { ReadingOnly } from '../../ui/form/reading-only';
 import { LegFields } from './components/leg-fields';
 import { LegsRuler } from './components/legs-ruler';
 import {
@@ -42,23 +44,40 @@ export function RouteForm({ opened, returnTo, onTheirsTaken }: RouteFormProps) {
   const account = useAccount();
   const unitSystem = useUnitSystem();
   const context = { unitSystem, before: opened?.revision.spec ?? NEW_ROUTE };
+  const draft = useFormDraft(`routes/${opened?.id ?? 'new'}`, {
+    values: routeFormValues(context.before, unitSystem),
+    baseRevisionId: opened?.revision.id ?? null,
+  });
+  const canSave = hasRole(account, ['engineer']);
   const keeping = useKeptThingForm({
     accountId: account.id,
     basePath: account.basePath,
     collection: 'routes',
     opened,
     returnTo,
+    draft,
   });
   const toSpec = (values: RouteFormValues) => routeSpecFrom(values, context);
   const { conflict } = keeping;
   return (
     <Form<RouteFormValues>
       label="Route"
-      initialValues={routeFormValues(context.before, unitSystem)}
+      initialValues={draft.start}
       validate={validateRouteForm(context)}
       toFieldName={specFieldName}
       onSubmit={(values) => keeping.submit(toSpec(values))}
     >
+      {canSave ? (
+        <FormDraft
+          isRestored={draft.isRestored}
+          isNew={opened === null}
+          fresh={draft.fresh}
+          onChange={(values: RouteFormValues) => draft.keep(values, keeping.baseRevisionId())}
+          onDropped={draft.clear}
+        />
+      ) : (
+        <ReadingOnly what="routes" hasFields />
+      )}
       <Sheet title="Route">
         <FormField name="name" label="Name" />
         <RouteRuler toSpec={toSpec} />
@@ -84,7 +103,7 @@ export function RouteForm({ opened, returnTo, onTheirsTaken }: RouteFormProps) {
       </Sheet>
       <FormSaving<RouteFormValues>
         submitLabel={opened === null ? 'Save route' : 'Save as a new revision'}
-        refusal={hasRole(account, ['engineer']) ? undefined : 'Saving routes is for engineers.'}
+        canSave={canSave}
         said={keeping.said}
         fault={keeping.fault}
         conflict={

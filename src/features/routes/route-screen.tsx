@@ -4,9 +4,10 @@ import { useState } from 'react';
 import { isApiError } from '../../api/api-error';
 import { describeError } from '../../api/describe-error';
 import { keptThingsQueries } from '../../api/kept-things-queries';
-import { useAccount } from '../../session';
+import { hasRole, useAccount } from '../../session';
 import { Screen } from '../../ui';
 import { FetchedScreen } from '../../ui/fetched-screen';
+import { ReadingOnly } from '../../ui/form/reading-only';
 import { RouteForm } from './route-form';
 
 /** A new route. */
@@ -15,7 +16,11 @@ export function NewRouteScreen() {
   const { return: returnTo } = useLocalSearchParams<{ return?: string }>();
   return (
     <Screen title="New route" back={{ href: `${account.basePath}/routes`, label: 'Routes' }}>
-      <RouteForm opened={null} returnTo={returnTo} onTheirsTaken={() => undefined} />
+      {hasRole(account, ['engineer']) ? (
+        <RouteForm opened={null} returnTo={returnTo} onTheirsTaken={() => undefined} />
+      ) : (
+        <ReadingOnly what="routes" />
+      )}
     </Screen>
   );
 }

@@ -20,7 +20,8 @@ export function SignInScreen() {
   return (
     <Screen title="Sign in" width={people.length === 0 ? 'narrow' : 'pair'}>
       <Body tone="second">
-        Larderline tells how many days a food keeps in a given wall, what ends it, and how sure that is.
+        Larderline tells how many days a food keeps in a given wall, what ends it, and which numbers that
+        leans on.
       </Body>
       {session.status === 'signed-out' && session.reason === 'expired' ? (
         <Notice kind="caution" isLive>

@@ -72,7 +72,8 @@ function StudyFormScreen({ opened }: { opened: StudyWithResult | null }) {
     version: 0,
     values: withCreated(draft.content.values, created),
   }));
-  const [isRestored, setIsRestored] = useState(draft.isRestored);
+  // Who comes back from making a part of the question knows that the rest was kept.
+  const [isRestored, setIsRestored] = useState(draft.isRestored && created === undefined);
   const [isOverwriting, setIsOverwriting] = useState(false);
   const [overwriteError, setOverwriteError] = useState<unknown>(null);
 

@@ -72,6 +72,28 @@ function meanAt(interfaces: number[], index: number): number {
 /** Changes below this part are not worth a reason. */
 const SAME_WITHIN = 0.005;
 
+/** Whether the leg says one way round passes less oxygen while the route says the other way keeps it out longer. */
+export function goAgainstEachOther(
+  { oxygenPermeanceAsLaid, oxygenPermeanceTurned }: TurnedRoundLeg,
+  asLaid: EvaluationAnswer,
+  turned: EvaluationAnswer,
+): boolean {
+  const isTighterTurned = oxygenPermeanceTurned < oxygenPermeanceAsLaid;
+  return (['oxygen_uptake_mg_per_kg', 'headspace_oxygen_percent'] as const).some((name) => {
+    const here = oxygenDay(asLaid, name);
+    const there = oxygenDay(turned, name);
+    return Math.abs(there / here - 1) > SAME_WITHIN && there > here !== isTighterTurned;
+  });
+}
+
+function oxygenDay(
+  answer: EvaluationAnswer,
+  name: 'oxygen_uptake_mg_per_kg' | 'headspace_oxygen_percent',
+): number {
+  const limit = answer.limits[name];
+  return limit?.status === 'reached' ? limit.days : Infinity;
+}
+
 /** Why the two ways round differ, or why they do not. */
 export function turnedRoundReason(comparison: TurnedRoundLeg, percent: (fraction: number) => string): string {
   const { oxygenPermeanceAsLaid: asLaid, oxygenPermeanceTurned: turned, sensitive } = comparison;

@@ -325,6 +325,9 @@ function titleBlockCells(
     { label: 'revision', value: opened === null ? 'not saved yet' : String(opened.revision.number) },
     { label: 'layers', value: String(wall.layers.length) },
     { label: 'in all', value: gauges.every(Number.isFinite) ? totalGauge(gauges, unitSystem) : '–' },
-    { label: 'partly from memory, invented or usage', value: `${weak} of ${wall.layers.length} layers` },
+    {
+      label: 'partly from memory, invented or common practice',
+      value: `${weak} of ${wall.layers.length} layers`,
+    },
   ];
 }

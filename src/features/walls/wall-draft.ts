@@ -105,6 +105,11 @@ export function gaugeUm(gauge: DraftGauge): number {
   return gauge.unit === 'um' ? value : fromDisplay(value, 'thickness_um', 'us_customary');
 }
 
+/** A gauge that somebody types in the reader's unit. */
+export function typedGauge(text: string, unitSystem: DisplayUnitSystem): DraftGauge {
+  return { text, unit: gaugeUnitOf(unitSystem), storedUm: null };
+}
+
 /** A stored gauge as it enters a field, in the reader's unit. */
 export function gaugeFromUm(thicknessUm: number, unitSystem: DisplayUnitSystem): DraftGauge {
   const unit = gaugeUnitOf(unitSystem);

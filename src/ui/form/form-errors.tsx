@@ -3,7 +3,7 @@ import { View } from 'react-native';
 import { Notice } from '../notice';
 import { Small } from '../text';
 import { SPACE } from '../tokens';
-import { faultsByName } from './fault-list';
+import { faultsByName, type NamedFault } from './fault-list';
 import { controlId, useFormContextValue } from './form-context';
 
 /** Above the submit button once the form was sent in vain: every fault by name, each leading to its field. */
@@ -17,7 +17,7 @@ export function FormErrors() {
   const standing = Object.entries(serverFaults)
     .filter(([name, fault]) => !ownNames.has(name) && Object.is(fault.valueSent, getIn(formik.values, name)))
     .map(([name, fault]) => ({ name, message: fault.message }));
-  const entries = [...own, ...standing];
+  const entries = inPageOrder([...own, ...standing], formId);
   if (entries.length === 0 && formFault === null) return null;
 
   const title =
@@ -46,4 +46,18 @@ export function FormErrors() {
       </View>
     </Notice>
   );
+}
+
+/** As the fields stand on the page; a fault without a field of its own comes last. */
+function inPageOrder(entries: NamedFault[], formId: string): NamedFault[] {
+  const placed = entries.map((entry) => ({
+    entry,
+    control: document.getElementById(controlId(formId, entry.name)),
+  }));
+  placed.sort((a, b) => {
+    if (a.control === null || b.control === null)
+      return Number(a.control === null) - Number(b.control === null);
+    return a.control.compareDocumentPosition(b.control) & Node.DOCUMENT_POSITION_FOLLOWING ? -1 : 1;
+  });
+  return placed.map(({ entry }) => entry);
 }

@@ -3,7 +3,6 @@ import { Button } from '../button';
 import { ConflictNotice } from '../conflict-notice';
 import { DataTable } from '../data-table';
 import { FailedState } from '../failed-state';
-import { Notice } from '../notice';
 import { Inline, Stack } from '../stack';
 import { StatusLine } from '../status-line';
 import { FormErrors } from './form-errors';
@@ -17,8 +16,8 @@ export interface FormDifference {
 
 export interface FormSavingProps<Values> {
   submitLabel: string;
-  /** Why this person cannot save; stands in place of the button. */
-  refusal?: string;
+  /** False for people who only read here: there is no foot then. */
+  canSave: boolean;
   /** What just happened; '' while there is nothing to say. */
   said: string;
   fault: { title: string; message: string; reference?: string } | null;
@@ -37,9 +36,9 @@ export interface FormSavingProps<Values> {
 }
 
 /** The foot of a form that is saved in revisions: faults, a lost race, the button, and what came of it. */
-export function FormSaving<Values>({ submitLabel, refusal, said, fault, conflict }: FormSavingProps<Values>) {
+export function FormSaving<Values>({ submitLabel, canSave, said, fault, conflict }: FormSavingProps<Values>) {
   const { values } = useFormikContext<Values>();
-  if (refusal !== undefined) return <Notice>{refusal}</Notice>;
+  if (!canSave) return null;
   return (
     <Stack gap="x3">
       {conflict === null ? null : (

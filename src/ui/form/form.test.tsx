@@ -115,4 +115,25 @@ describe('Form', () => {
     fireEvent.click(screen.getByRole('button', { name: 'Save' }));
     await screen.findByText('The server cannot be reached.');
   });
+
+  it('lists the faults as the fields stand on the page', async () => {
+    render(
+      <Form<Values>
+        initialValues={{ name: '', gauge_um: '' }}
+        validate={() => ({ name: 'Name: enter a name.', gauge_um: 'Gauge: enter a number.' })}
+        onSubmit={() => Promise.resolve()}
+      >
+        <FormNumberField name="gauge_um" label="Gauge" unit="µm" />
+        <FormField name="name" label="Name" />
+        <FormErrors />
+        <FormSubmit label="Save" busyLabel="Saving…" />
+      </Form>,
+    );
+    fireEvent.click(screen.getByRole('button', { name: 'Save' }));
+    await screen.findByText('2 fields need a look');
+    expect(screen.getAllByRole('link').map((link) => link.textContent)).toEqual([
+      'Gauge: enter a number.',
+      'Name: enter a name.',
+    ]);
+  });
 });

@@ -27,7 +27,7 @@ export async function typeFilm({ page, press }: JourneyPage, film: FilmDataSheet
 
   const oxygen = sheet(page, 'Oxygen');
   await fillFields(oxygen, {
-    Value: film.oxygen.value,
+    'Oxygen value': film.oxygen.value,
     'Measured at': '23',
     'Both sides at': film.oxygen.humidity,
   });
@@ -40,7 +40,7 @@ export async function typeFilm({ page, press }: JourneyPage, film: FilmDataSheet
   }
 
   const water = sheet(page, 'Water vapour');
-  await fillFields(water, { Value: film.waterValue, 'Moist side': '90', 'Dry side': '0' });
+  await fillFields(water, { 'Water value': film.waterValue, 'Moist side': '90', 'Dry side': '0' });
   await field(water, 'Unit').selectOption({ label: 'g·µm/(m²·day)' });
 }
 

@@ -8,13 +8,19 @@ import { FieldGrid } from '../../../ui/field-grid';
 import { computedGas, statedFrom } from '../gas-form-values';
 import type { MaterialFormValues } from '../material-form-values';
 import { siInWords } from '../si-words';
-import { isRate, suitableUnits, unitInPrint, type Gas, type LayerKind } from '../unit-choice';
+import { GAS_TITLES, humidityLabel, VALUE_LABELS } from '../material-field-labels';
+import { isRate, needsGauge, suitableUnits, unitInPrint, type Gas, type LayerKind } from '../unit-choice';
 import { CurveFields } from './curve-fields';
 
-const TITLES: Record<Gas, string> = { oxygen: 'Oxygen', water: 'Water vapour' };
+export interface GasFieldsProps {
+  gas: Gas;
+  kind: LayerKind;
+  /** Only for materials that were kept without one: a new value says at which humidity it was measured. */
+  isHumidityOptional: boolean;
+}
 
 /** One gas as its data sheet states it, and what it comes to in SI. */
-export function GasFields({ gas, kind }: { gas: Gas; kind: LayerKind }) {
+export function GasFields({ gas, kind, isHumidityOptional }: GasFieldsProps) {
   const { values } = useFormikContext<MaterialFormValues>();
   const unitSystem = useUnitSystem();
   const celsius = fieldUnit('temperature_C', unitSystem);
@@ -26,15 +32,15 @@ export function GasFields({ gas, kind }: { gas: Gas; kind: LayerKind }) {
   });
   return (
     <Sheet
-      title={TITLES[gas]}
+      title={GAS_TITLES[gas]}
       subtitle={
         kind === 'film'
-          ? 'For the material itself; it scales with the gauge.'
+          ? 'Per thickness, or as measured on one gauge: choose the unit that your data sheet has.'
           : 'For the whole coating; its gauge does not scale it.'
       }
     >
       <FieldGrid leastWidthPx={200}>
-        <FormNumberField name={`${path}.value`} label="Value" />
+        <FormNumberField name={`${path}.value`} label={VALUE_LABELS[gas]} />
         <FormSelect
           name={`${path}.unit`}
           label="Unit"
@@ -45,14 +51,22 @@ export function GasFields({ gas, kind }: { gas: Gas; kind: LayerKind }) {
         />
       </FieldGrid>
       <FieldGrid>
+        {needsGauge(gas, kind, unit) ? (
+          <FormNumberField
+            name={`${path}.thickness_um`}
+            label="Measured on"
+            unit={fieldUnit('thickness_um', unitSystem)}
+            hint="The gauge of the film in that test."
+          />
+        ) : null}
         <FormNumberField name={`${path}.temperature_C`} label="Measured at" unit={celsius} />
         {gas === 'oxygen' ? (
           <FormNumberField
             name={`${path}.relative_humidity`}
-            label="Both sides at"
+            label={humidityLabel(gas)}
             unit="%"
-            hint="Relative humidity."
-            options={{ isOptional: true }}
+            hint="Relative humidity in the test; 0 only where it was dry."
+            options={{ isOptional: isHumidityOptional }}
           />
         ) : null}
         {gas === 'oxygen' && isRate('oxygen', unit) ? (
@@ -72,7 +86,7 @@ export function GasFields({ gas, kind }: { gas: Gas; kind: LayerKind }) {
         {gas === 'water' && !isRate('water', unit) ? (
           <FormNumberField
             name={`${path}.relative_humidity`}
-            label="Humidity of the value"
+            label={humidityLabel(gas)}
             unit="%"
             options={{ isOptional: true }}
           />

@@ -4,7 +4,9 @@ import { formatExact, formatQuantity, type DisplayUnitSystem } from '../../../..
 import { provenanceFieldInWords, provenanceInWords } from '../../../api/kept-forms/provenance-words';
 import { useUnitSystem } from '../../../session';
 import { DataTable, Disclosure, Figure, Sheet, Small, SPACE } from '../../../ui';
+import { conditionsInWords } from '../conditions-in-words';
 import { curvePoints } from '../gas-form-values';
+import { GAS_TITLES } from '../material-field-labels';
 import { shownCoefficient } from '../si-words';
 import { unitInPrint, type Gas } from '../unit-choice';
 import { HumidityCurveDrawing } from './humidity-curve-drawing';
@@ -31,8 +33,6 @@ export function MaterialFacts({ spec }: { spec: MaterialSpec }) {
   );
 }
 
-const TITLES: Record<Gas, string> = { oxygen: 'Oxygen', water: 'Water vapour' };
-
 function GasFacts({ gas, spec }: { gas: Gas; spec: Exclude<MaterialSpec, { kind: 'foil' }> }) {
   const unitSystem = useUnitSystem();
   const { stated, gas: block, geometric_sd } = spec[gas];
@@ -41,7 +41,7 @@ function GasFacts({ gas, spec }: { gas: Gas; spec: Exclude<MaterialSpec, { kind:
   const ground = spec.provenance.find((entry) => entry.field === `${gas}.value`);
   return (
     <Sheet
-      title={TITLES[gas]}
+      title={GAS_TITLES[gas]}
       subtitle={
         ground === undefined
           ? undefined
@@ -72,24 +72,6 @@ function GasFacts({ gas, spec }: { gas: Gas; spec: Exclude<MaterialSpec, { kind:
       <Provenance spec={spec} prefix={gas} />
     </Sheet>
   );
-}
-
-function conditionsInWords(gas: Gas, stated: StatedValue, unitSystem: DisplayUnitSystem): string {
-  const at = formatQuantity(stated.temperature_C, 'temperature_C', { unitSystem, isExact: true }).text;
-  const percent = (fraction: number) => `${formatExact(Number((fraction * 100).toPrecision(4)))} %`;
-  if (
-    gas === 'water' &&
-    stated.relative_humidity_high !== undefined &&
-    stated.relative_humidity_low !== undefined
-  ) {
-    return `at ${at} between ${percent(stated.relative_humidity_high)} and ${percent(stated.relative_humidity_low)}`;
-  }
-  const humidity =
-    stated.relative_humidity === undefined ? '' : `, ${percent(stated.relative_humidity)} on both sides`;
-  const fraction = stated.oxygen_mole_fraction_dry;
-  const testGas =
-    fraction === undefined ? '' : fraction === 1 ? ', pure oxygen' : `, ${percent(fraction)} oxygen`;
-  return `at ${at}${humidity}${testGas}`;
 }
 
 function temperatureInWords(stated: StatedValue, unitSystem: DisplayUnitSystem): string {

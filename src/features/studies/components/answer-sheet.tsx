@@ -10,18 +10,20 @@ import {
   plainSentence,
   type LimitRow,
 } from '../answer-words';
+import { answerReason } from '../answer-reason';
 import { drawnLayers } from '../drawn-layers';
 import { useFigures } from '../use-figures';
 import { AnswerSentence } from './answer-sentence';
 
 export interface AnswerSheetProps {
   result: StudyResult;
+  wallIndex: number;
   /** The wall whose limits are listed. */
   candidate: Candidate;
 }
 
 /** The answer first: the sentence, the ruler of days, both limits. */
-export function AnswerSheet({ result, candidate }: AnswerSheetProps) {
+export function AnswerSheet({ result, candidate, wallIndex }: AnswerSheetProps) {
   const show = useFigures();
   const targetDays = result.target_days;
   const horizonDays = candidate.description.horizon_days;
@@ -36,6 +38,11 @@ export function AnswerSheet({ result, candidate }: AnswerSheetProps) {
       <View style={{ gap: SPACE.x1 }}>
         <AnswerSentence parts={sentence} />
         {result.candidates.length > 1 ? <Small>{candidate.name}</Small> : null}
+        {answerReason(candidate, wallIndex, show).map((words) => (
+          <Body key={words} tone="second">
+            {words}
+          </Body>
+        ))}
       </View>
       <ChartWithTable
         label="Table of the ruler"

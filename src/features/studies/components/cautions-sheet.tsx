@@ -1,17 +1,21 @@
 import type { Candidate, StudyResult } from '../../../../shared/contract/studies';
 import { Disclosure, Notice, Small, Stack } from '../../../ui';
 import { ALWAYS_SAID, answerCautions } from '../answer-cautions';
+import { useFigures } from '../use-figures';
 
 const MOST_IN_SIGHT = 3;
 
 /** What the answer leans on, what the food asks for, and what no estimate can say. */
 export function Cautions({ result, candidate }: { result: StudyResult; candidate: Candidate }) {
-  const cautions = answerCautions(candidate);
-  const inSight = cautions.slice(0, MOST_IN_SIGHT);
-  const rest = cautions.slice(MOST_IN_SIGHT);
+  const show = useFigures();
+  // A result from before trays came in has no such field.
+  const { tray }: Partial<StudyResult['pack']> = result.pack;
+  const { weighty, slight } = answerCautions(candidate, { trayLayers: tray?.layers, show });
+  const inSight = weighty.slice(0, MOST_IN_SIGHT);
+  const rest = [...weighty.slice(MOST_IN_SIGHT), ...slight];
   return (
     <Stack gap="x3">
-      {cautions.length === 0 ? null : (
+      {inSight.length + rest.length === 0 ? null : (
         <Notice kind="caution" title="What this answer leans on">
           <Stack gap="x1">
             {inSight.map((words) => (

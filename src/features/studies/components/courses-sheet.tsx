@@ -59,7 +59,7 @@ export function CoursesSheet({ candidate, targetDays }: CoursesSheetProps) {
   return (
     <Sheet
       title="Over the days"
-      subtitle="Legs shaded by turns; dashed across: the limit; dashed down: the target."
+      subtitle="Legs numbered and shaded by turns; dashed across: the limit; dashed down: the target."
     >
       <Stack gap="x4">
         {worthDrawing.map((spec) => (
@@ -141,10 +141,7 @@ function Course({ spec, candidate, window, show }: CourseProps) {
         reached={met ?? null}
         targetDays={window.targetDays}
         lastDay={window.lastDay}
-        legs={description.route.legs.map((leg) => ({
-          days: leg.days,
-          label: `${show.exact(leg.temperature_C, 'temperature_C')} ${show.exact(leg.relative_humidity, 'fraction_as_percent')}`,
-        }))}
+        legDays={description.route.legs.map((leg) => leg.days)}
         afterLast={description.route.after_last}
         formatValue={show.tick}
         formatDays={show.tick}

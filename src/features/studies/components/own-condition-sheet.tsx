@@ -75,15 +75,18 @@ export function OwnConditionSheet({ layers }: { layers: LayerDescription[] }) {
             />
             <ResultLine
               label="WVTR"
-              note={
-                wall.wvtrGPerM2Day === 0 ? 'equal humidities drive nothing' : 'between the two humidities'
+              note="between the two humidities"
+              words={
+                'condition' in read && read.condition.humidityOutside === read.condition.humidityInside
+                  ? 'no humidity difference, nothing flows'
+                  : undefined
               }
               figures={show.figures(wall.wvtrGPerM2Day, 'water_rate_g_per_m2_day')}
               unit={show.unit('water_rate_g_per_m2_day')}
-              isBelow={wall.wvtrGPerM2Day > 0 && isBelowMeasurable(wall.wvtrGPerM2Day)}
+              isBelow={isBelowMeasurable(wall.wvtrGPerM2Day)}
             />
             <ResultLine
-              label="Water permeance"
+              label="Water vapour permeance"
               note="of the whole wall"
               figures={show.figures(wall.waterPermeanceSi, 'water_permeance_mol_per_m2_s_Pa')}
               unit={show.unit('water_permeance_mol_per_m2_s_Pa')}
@@ -117,9 +120,11 @@ interface ResultLineProps {
   figures: string;
   unit: string;
   isBelow?: boolean;
+  /** In place of a figure. */
+  words?: string;
 }
 
-function ResultLine({ label, note, figures, unit, isBelow = false }: ResultLineProps) {
+function ResultLine({ label, note, figures, unit, isBelow = false, words }: ResultLineProps) {
   const { colors } = useTheme();
   return (
     <View
@@ -140,7 +145,13 @@ function ResultLine({ label, note, figures, unit, isBelow = false }: ResultLineP
         </Small>
         <Small tone="third">{note}</Small>
       </View>
-      <Measurable figures={figures} unit={unit} isBelowMeasurable={isBelow} size="body" />
+      {words === undefined ? (
+        <Measurable figures={figures} unit={unit} isBelowMeasurable={isBelow} size="body" />
+      ) : (
+        <Small tone="ink" align="right">
+          {words}
+        </Small>
+      )}
     </View>
   );
 }

@@ -4,11 +4,13 @@ import { View } from 'react-native';
 import type { Candidate, StudyResult, StudyWithResult } from '../../../../shared/contract/studies';
 import { Choice, SPACE, Select, Stack, TitleBlock, useIsAtLeast } from '../../../ui';
 import { layersFromMemory } from '../answer-cautions';
+import { decidingLeg } from '../deciding-leg';
 import { AnswerSheet } from './answer-sheet';
 import { Cautions } from './cautions-sheet';
 import { CoursesSheet } from './courses-sheet';
 import { InputsSheet } from './inputs-sheet';
 import { OwnConditionSheet } from './own-condition-sheet';
+import { SideBySideSheet } from './side-by-side-sheet';
 import { TransmissionSheet } from './transmission-sheet';
 import { TurnedRoundSheet } from './turned-round-sheet';
 import { ShareSheet, WallSheet } from './wall-sheet';
@@ -36,7 +38,10 @@ export function StudyAnswer({ study, result }: { study: StudyWithResult; result:
         candidate={candidate}
         hasTwoColumns={hasTwoColumns}
       />
-      <TitleBlock label="What this answer was made from" cells={titleCells(study, result)} />
+      {result.candidates.length > 1 ? (
+        <SideBySideSheet result={result} notes={study.revision.spec.laminate_notes ?? []} />
+      ) : null}
+      <TitleBlock label="What this answer was made from" cells={titleCells(study, result, candidate)} />
     </View>
   );
 }
@@ -49,11 +54,12 @@ interface CandidateAnswerProps {
 
 function CandidateAnswer({ result, candidate, hasTwoColumns }: CandidateAnswerProps) {
   const wall = candidate.answer.walls[WALL];
-  const [legNumber, setLegNumber] = useState(0);
+  const opening = decidingLeg(candidate, WALL);
+  const [legNumber, setLegNumber] = useState(opening.leg);
   const [selectedLayer, setSelectedLayer] = useState<number | undefined>(undefined);
   const leg = wall?.legs.find((one) => one.leg === legNumber) ?? wall?.legs[0];
   const layers = candidate.description.pack.walls[WALL]?.layers ?? [];
-  const answer = <AnswerSheet result={result} candidate={candidate} />;
+  const answer = <AnswerSheet result={result} candidate={candidate} wallIndex={WALL} />;
   const cautions = <Cautions result={result} candidate={candidate} />;
   const courses = <CoursesSheet candidate={candidate} targetDays={result.target_days} />;
   const inputs = <InputsSheet candidate={candidate} wallIndex={WALL} />;
@@ -68,7 +74,9 @@ function CandidateAnswer({ result, candidate, hasTwoColumns }: CandidateAnswerPr
     );
   }
   const selection = { candidate, leg, selectedLayer, onSelectLayer: setSelectedLayer };
-  const section = <WallSheet {...selection} wall={wall} onLegChange={setLegNumber} />;
+  const section = (
+    <WallSheet {...selection} wall={wall} legReason={opening.reason} onLegChange={setLegNumber} />
+  );
   const shares = <ShareSheet {...selection} />;
   const transmission = <TransmissionSheet wall={wall} />;
   const turned = <TurnedRoundSheet candidate={candidate} wallIndex={WALL} leg={leg} />;
@@ -142,8 +150,8 @@ function bestCandidate(candidates: Candidate[]): Candidate | undefined {
 
 const SHOWN_OF_CHECKSUM = 12;
 
-function titleCells(study: StudyWithResult, result: StudyResult) {
-  const { fromMemory, all } = layersFromMemory(result.candidates);
+function titleCells(study: StudyWithResult, result: StudyResult, candidate: Candidate) {
+  const { fromMemory, all } = layersFromMemory(candidate.layers);
   return [
     { label: 'study', value: study.revision.spec.name },
     { label: 'route', value: result.route.name },
@@ -151,7 +159,7 @@ function titleCells(study: StudyWithResult, result: StudyResult) {
     { label: 'pack', value: result.pack.name },
     { label: 'engine', value: result.engine_version },
     { label: 'computed', value: utcMinute(result.created_at) },
-    { label: 'data from memory', value: `${fromMemory} of ${all} layers` },
+    { label: 'data from memory', value: `${fromMemory} of ${all} layers of this wall` },
     { label: 'result', value: `no. ${result.number}` },
     { label: 'checksum', value: result.sha256.slice(0, SHOWN_OF_CHECKSUM) },
   ];

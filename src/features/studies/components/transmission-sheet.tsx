@@ -1,4 +1,5 @@
 import type { WallAnswer, WallInTest } from '../../../../shared/engine/description/evaluation';
+import { testName } from '../../../../shared/charts/test-name';
 import { DataTable, Sheet } from '../../../ui';
 import { useFigures, type Figures } from '../use-figures';
 import { Measurable, isBelowMeasurable } from './measurable';
@@ -31,7 +32,7 @@ export function TransmissionSheet({ wall }: { wall: WallAnswer }) {
           },
           {
             key: 'waterPermeance',
-            title: 'Water permeance',
+            title: 'Water vapour permeance',
             unit: show.unit('water_permeance_mol_per_m2_s_Pa'),
             kind: 'figure',
           },
@@ -66,7 +67,7 @@ export function TransmissionSheet({ wall }: { wall: WallAnswer }) {
         ]}
         rows={wall.tests.map((one, index) => ({
           id: String(index),
-          test: testName(one, show),
+          test: testName(one.test, show.exact),
           rate: <TestRate test={one} show={show} />,
         }))}
       />
@@ -84,20 +85,4 @@ function TestRate({ test, show }: { test: WallInTest; show: Figures }) {
       isBelowMeasurable={test.is_below_measurable}
     />
   );
-}
-
-function testName({ test }: WallInTest, show: Figures): string {
-  const temperature = show.exact(test.temperature_C, 'temperature_C');
-  if (test.gas === 'water') {
-    return `WVTR at ${temperature}, ${show.exact(test.relative_humidity_high, 'fraction_as_percent')} against ${show.exact(test.relative_humidity_low, 'fraction_as_percent')}`;
-  }
-  const gas =
-    test.oxygen_mole_fraction_dry === 1
-      ? 'pure oxygen'
-      : `${show.exact(test.oxygen_mole_fraction_dry, 'fraction_as_percent')} oxygen`;
-  const humidity =
-    test.relative_humidity_outside === test.relative_humidity_inside
-      ? `${show.exact(test.relative_humidity_outside, 'fraction_as_percent')} on both sides`
-      : `${show.exact(test.relative_humidity_outside, 'fraction_as_percent')} outside, ${show.exact(test.relative_humidity_inside, 'fraction_as_percent')} inside`;
-  return `OTR at ${temperature}, ${humidity}, ${gas}`;
 }

@@ -4,7 +4,7 @@ import type { Candidate } from '../../../../shared/contract/studies';
 import type { EvaluationAnswer, WallOnLeg } from '../../../../shared/engine/description/evaluation';
 import { Body, DataTable, Sheet, Small } from '../../../ui';
 import { LIMIT_WORDS, daysFigures } from '../answer-words';
-import { compareOnLeg, evaluateTurned, turnedRoundReason } from '../turned-round';
+import { compareOnLeg, evaluateTurned, goAgainstEachOther, turnedRoundReason } from '../turned-round';
 import { useFigures } from '../use-figures';
 import { legTitle } from './wall-sheet';
 
@@ -27,8 +27,11 @@ export function TurnedRoundSheet({ candidate, wallIndex, leg }: TurnedRoundSheet
   });
   if (comparison === null) return null;
   return (
-    <Sheet title="Turned round" subtitle={`Inside face out · ${legTitle(leg)}`}>
-      <Body>{turnedRoundReason(comparison, show.percent)}</Body>
+    <Sheet
+      title="Turned round"
+      subtitle={`Inside face out. Permeance as leg ${leg.leg + 1} begins; days over the whole route.`}
+    >
+      <Body>{`${legTitle(leg)}. ${turnedRoundReason(comparison, show.percent)}`}</Body>
       <DataTable
         caption="Both ways round"
         isCaptionHidden
@@ -42,7 +45,7 @@ export function TurnedRoundSheet({ candidate, wallIndex, leg }: TurnedRoundSheet
             id: 'permeance',
             what: (
               <View>
-                <Small tone="ink">Oxygen permeance</Small>
+                <Small tone="ink">{`Oxygen permeance on leg ${leg.leg + 1}`}</Small>
                 <Small tone="third">{show.unit('oxygen_permeance_mol_per_m2_s_Pa')}</Small>
               </View>
             ),
@@ -50,9 +53,19 @@ export function TurnedRoundSheet({ candidate, wallIndex, leg }: TurnedRoundSheet
             turned: show.figures(comparison.oxygenPermeanceTurned, 'oxygen_permeance_mol_per_m2_s_Pa'),
           },
           ...limitComparison(candidate.answer, turned),
-          { id: 'life', what: 'Days kept', asLaid: lifeOf(candidate.answer), turned: lifeOf(turned) },
+          {
+            id: 'life',
+            what: 'Days kept, whole route',
+            asLaid: lifeOf(candidate.answer),
+            turned: lifeOf(turned),
+          },
         ]}
       />
+      {goAgainstEachOther(comparison, candidate.answer, turned) ? (
+        <Small>
+          {`The days count every leg, and the humidities differ from leg to leg: leg ${leg.leg + 1} alone does not tell which way round keeps longer.`}
+        </Small>
+      ) : null}
       <Small tone="third">{`“Turned” is a preview by engine ${turned.engine_version} in this browser; it is not kept.`}</Small>
     </Sheet>
   );
@@ -66,7 +79,7 @@ function limitComparison(asLaid: EvaluationAnswer, turned: EvaluationAnswer) {
     return [
       {
         id: name,
-        what: `Day of the ${LIMIT_WORDS[name].cause} limit`,
+        what: `Day of the ${LIMIT_WORDS[name].cause} limit, whole route`,
         asLaid: here.status === 'reached' ? daysFigures(here.days) : 'not reached',
         turned: there.status === 'reached' ? daysFigures(there.days) : 'not reached',
       },

@@ -12,6 +12,8 @@ export interface WallSheetProps {
   candidate: Candidate;
   wall: WallAnswer;
   leg: WallOnLeg;
+  /** Why the view opened on the leg it did. */
+  legReason: string;
   onLegChange: (leg: number) => void;
   selectedLayer: number | undefined;
   onSelectLayer: (layer: number) => void;
@@ -21,7 +23,7 @@ const MOST_LEGS_IN_SIGHT = 4;
 
 /** The wall cut through, and both gases falling through it as one leg begins. */
 export function WallSheet(props: WallSheetProps) {
-  const { candidate, wall, leg, onLegChange, selectedLayer, onSelectLayer } = props;
+  const { candidate, wall, leg, legReason, onLegChange, selectedLayer, onSelectLayer } = props;
   const show = useFigures();
   const layers = drawnLayers(candidate, show);
   const stamp = legStamp(leg, show);
@@ -40,6 +42,7 @@ export function WallSheet(props: WallSheetProps) {
         <LegPicker
           wall={wall}
           leg={leg}
+          legReason={legReason}
           onLegChange={onLegChange}
           show={show}
           areAllShown={wall.legs.length >= candidate.description.route.legs.length}
@@ -86,7 +89,7 @@ export function ShareSheet({
   leg,
   selectedLayer,
   onSelectLayer,
-}: Omit<WallSheetProps, 'wall' | 'onLegChange'>) {
+}: Omit<WallSheetProps, 'wall' | 'legReason' | 'onLegChange'>) {
   const show = useFigures();
   const layers = drawnLayers(candidate, show);
   const percentFigures = (share: number) => sharePercent(share, (value) => formatNumber(value));
@@ -130,11 +133,12 @@ interface LegPickerProps {
   areAllShown: boolean;
   wall: WallAnswer;
   leg: WallOnLeg;
+  legReason: string;
   onLegChange: (leg: number) => void;
   show: Figures;
 }
 
-function LegPicker({ wall, leg, onLegChange, show, areAllShown }: LegPickerProps) {
+function LegPicker({ wall, leg, legReason, onLegChange, show, areAllShown }: LegPickerProps) {
   const isFew = wall.legs.length <= MOST_LEGS_IN_SIGHT;
   const options = wall.legs.map((one) => ({
     value: String(one.leg),
@@ -143,11 +147,11 @@ function LegPicker({ wall, leg, onLegChange, show, areAllShown }: LegPickerProps
       : `${legTitle(one)}, ${show.exact(one.temperature_C, 'temperature_C')}`,
   }));
   const onChange = (value: string) => onLegChange(Number(value));
-  return isFew ? (
-    <Choice label="Leg of the route" value={String(leg.leg)} onChange={onChange} options={options} />
-  ) : (
+  const Picker = isFew ? Choice : Select;
+  return (
     <Stack gap="x1">
-      <Select label="Leg of the route" value={String(leg.leg)} onChange={onChange} options={options} />
+      <Picker label="Leg of the route" value={String(leg.leg)} onChange={onChange} options={options} />
+      <Small tone="third">{legReason}</Small>
       {areAllShown ? null : <Small tone="third">Of a long route the first legs are shown.</Small>}
     </Stack>
   );

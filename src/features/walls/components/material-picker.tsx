@@ -2,12 +2,26 @@ import { useMemo, useState } from 'react';
 import { View } from 'react-native';
 import { HatchSwatch } from '../../../charts/mini-section';
 import { MATERIAL_CLASSES } from '../../../../shared/contract/materials';
-import { formatQuantity } from '../../../../shared/units/format';
+import { RULES } from '../../../../shared/contract/rules';
+import { formatQuantity, type DisplayUnitSystem } from '../../../../shared/units/format';
+import { fieldUnit } from '../../../api/kept-forms/typed-quantity';
 import type { KeptMaterial } from '../../../api/kept-things-queries';
 import { useUnitSystem } from '../../../session';
-import { Body, Button, Dialog, Heading, Inline, Link, Small, SPACE, Stack, TextField } from '../../../ui';
+import {
+  Body,
+  Button,
+  Dialog,
+  Heading,
+  Inline,
+  Link,
+  NumberField,
+  Small,
+  SPACE,
+  Stack,
+  TextField,
+} from '../../../ui';
 import { matchingMaterials } from '../matching-materials';
-import { gaugeFromUm, type ChosenMaterial, type DraftGauge } from '../wall-draft';
+import { gaugeFromUm, gaugeUm, typedGauge, type ChosenMaterial, type DraftGauge } from '../wall-draft';
 import { weakGroundInWords } from '../weak-ground';
 
 export interface MaterialPickerProps {
@@ -21,7 +35,7 @@ export interface MaterialPickerProps {
   onClose: () => void;
 }
 
-/** Materials by class; one press takes one at a usual gauge. */
+/** Materials by class; one press takes one at a usual gauge, or at a typed one where none is usual. */
 export function MaterialPicker(props: MaterialPickerProps) {
   const { title, materials, isOpen, onClose, searchAtFirst = '' } = props;
   const [search, setSearch] = useState(searchAtFirst);
@@ -66,13 +80,10 @@ interface PickedMaterialProps {
   onChosen: (material: ChosenMaterial, gauge: DraftGauge) => void;
 }
 
-const GAUGE_WHERE_NONE_IS_USUAL_UM = 20;
-
 function PickedMaterial({ material, onChosen }: PickedMaterialProps) {
   const unitSystem = useUnitSystem();
   const { spec } = material.revision;
-  const gauges =
-    spec.typical_gauges_um.length === 0 ? [GAUGE_WHERE_NONE_IS_USUAL_UM] : spec.typical_gauges_um;
+  const chosen = { material_id: material.id, material_revision_id: material.revision.id };
   const weak = weakGroundInWords(spec);
   return (
     <View role="group" aria-label={spec.name} style={{ gap: SPACE.x1, paddingVertical: SPACE.x2 }}>
@@ -91,23 +102,62 @@ function PickedMaterial({ material, onChosen }: PickedMaterialProps) {
       </View>
       {weak === '' ? null : <Small tone="third">{weak}</Small>}
       <Inline gap="x1">
-        {gauges.map((gaugeUm) => (
+        {spec.typical_gauges_um.map((gaugeUm) => (
           <Button
             key={gaugeUm}
             label={
               formatQuantity(gaugeUm, 'thickness_um', { unitSystem, isExact: unitSystem === 'metric' }).text
             }
-            onPress={() =>
-              onChosen(
-                { material_id: material.id, material_revision_id: material.revision.id },
-                gaugeFromUm(gaugeUm, unitSystem),
-              )
-            }
+            onPress={() => onChosen(chosen, gaugeFromUm(gaugeUm, unitSystem))}
           />
         ))}
       </Inline>
+      {spec.typical_gauges_um.length === 0 ? (
+        <FreeGauge onTyped={(gauge) => onChosen(chosen, gauge)} />
+      ) : null}
     </View>
   );
+}
+
+/** For a material that says no usual gauge: nobody's guess stands in the box. */
+function FreeGauge({ onTyped }: { onTyped: (gauge: DraftGauge) => void }) {
+  const unitSystem = useUnitSystem();
+  const [text, setText] = useState('');
+  const [error, setError] = useState('');
+  const take = () => {
+    const gauge = typedGauge(text, unitSystem);
+    const thicknessUm = gaugeUm(gauge);
+    if (thicknessUm > 0 && thicknessUm <= RULES.gauge.max) onTyped(gauge);
+    else setError(`Gauge: enter a number above 0, at most ${mostGauge(unitSystem)}.`);
+  };
+  return (
+    <div
+      style={{ display: 'flex', alignItems: 'flex-end', flexWrap: 'wrap', gap: SPACE.x2 }}
+      onKeyDown={(event) => {
+        // The picker stands within the wall's form, which Enter would send.
+        if (event.key !== 'Enter' || !(event.target instanceof HTMLInputElement)) return;
+        event.preventDefault();
+        take();
+      }}
+    >
+      <NumberField
+        label="Gauge"
+        value={text}
+        unit={fieldUnit('thickness_um', unitSystem)}
+        error={error}
+        options={{ widthInCharacters: 8 }}
+        onChange={(typed) => {
+          setText(typed);
+          setError('');
+        }}
+      />
+      <Button label="Use this gauge" onPress={take} />
+    </div>
+  );
+}
+
+function mostGauge(unitSystem: DisplayUnitSystem): string {
+  return formatQuantity(RULES.gauge.max, 'thickness_um', { unitSystem }).text;
 }
 
 function capitalised(words: string): string {

@@ -1,4 +1,5 @@
 import { View } from 'react-native';
+import { testName } from '../../../../shared/charts/test-name';
 import { formatQuantity, type DisplayUnitSystem, type ShownQuantity } from '../../../../shared/units/format';
 import type { WallInTest } from '../../../../shared/engine';
 import { useUnitSystem } from '../../../session';
@@ -74,7 +75,10 @@ function StandardTests({ tests, unitSystem }: { tests: WallInTest[]; unitSystem:
       ]}
       rows={tests.map((test, index) => ({
         id: String(index),
-        test: test.test.name ?? (test.test.gas === 'oxygen' ? 'OTR' : 'WVTR'),
+        test: testName(
+          test.test,
+          (value, kind) => formatQuantity(value, kind, { unitSystem, isExact: true }).text,
+        ),
         rate: shownRate(test, unitSystem),
       }))}
     />
