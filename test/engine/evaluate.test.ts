@@ -5,6 +5,7 @@ import {
   gasFromStated,
   InputError,
   standardTests,
+  storage,
   wallInTest,
   wallState,
   type EvaluationAnswer,
@@ -294,6 +295,48 @@ describe('extremes', () => {
     expect(answer.solver.status).toBe('finished');
     expect(answer.walls[0].legs).toHaveLength(60);
   });
+});
+
+describe('work without end', () => {
+  const moist = { isotherm: gab, initial_moisture_g_per_g: 0.02 };
+  const repeated = (days: number, walls?: number) =>
+    description({
+      layers: [polyester, vinylAlcohol, polyethylene],
+      ...(walls
+        ? {
+            pack: {
+              walls: Array.from({ length: walls }, () => ({
+                name: 'wall',
+                area_m2: 0.01,
+                layers: Array.from({ length: 20 }, () => vinylAlcohol),
+              })),
+            },
+          }
+        : {}),
+      food: moist,
+      route: {
+        legs: [
+          { temperature_C: 30, relative_humidity: 0.8, days },
+          { temperature_C: 12, relative_humidity: 0.4, days },
+        ],
+        after_last: 'repeat',
+      },
+      limits: { oxygen_uptake_mg_per_kg: 1e6 },
+      horizon_days: 20_000,
+    });
+
+  it('forty thousand repeated legs are followed to the end', () => {
+    const { solver, limits } = storage(repeated(0.5));
+    expect(solver.status).toBe('finished');
+    expect(solver.accepted_steps).toBeGreaterThan(39_000);
+    expect(limits.oxygen_uptake_mg_per_kg?.status).toBe('not reached');
+  }, 120_000);
+
+  it('is cut short with a word, in storage as in evaluate', () => {
+    const { solver } = storage(repeated(0.25, 20));
+    expect(solver.status).toBe('step limit reached');
+    expect(notFinite(solver)).toEqual([]);
+  }, 120_000);
 });
 
 describe('values as a data sheet states them', () => {

@@ -32,7 +32,7 @@ describe('the route form', () => {
     values.route.legs[0]!.temperature_C = '200';
     const errors = validateRouteForm({ unitSystem: 'us_customary', before: KEPT })(values);
     expect(errors.route?.legs?.[0]).toEqual({
-      temperature_C: 'Temperature: 200 °F does not fit; use -22 to 140 °F.',
+      temperature_C: 'Leg 1, temperature: 200 °F does not fit; use -22 to 140 °F.',
     });
   });
 });

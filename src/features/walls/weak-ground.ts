@@ -1,13 +1,8 @@
 import type { MaterialSpec } from '../../../shared/contract/materials';
-import { provenanceInWords, weakGroundOf, type ProvenanceKind } from '../../api/kept-forms/provenance-words';
+import { provenanceInWords, weakGroundOf } from '../../api/kept-forms/provenance-words';
 
 /** Which weak ground the coefficients of a material stand on; '' where all were read or measured. */
 export function weakGroundInWords(material: Pick<MaterialSpec, 'provenance'>): string {
   const kinds = weakGroundOf(material);
-  return kinds.length === 0 ? '' : `Some numbers ${kinds.map(groundInWords).join(', ')}`;
-}
-
-/** In the words that a study's answer uses. */
-function groundInWords(kind: ProvenanceKind): string {
-  return kind === 'common-practice' ? 'common practice' : provenanceInWords(kind);
+  return kinds.length === 0 ? '' : `Some numbers ${kinds.map(provenanceInWords).join(', ')}`;
 }
