@@ -20,24 +20,6 @@ export const HATCHES = [
 ] as const;
 export type Hatch = (typeof HATCHES)[number];
 
-/** What each hatch looks like, as a reader of a legend needs it. */
-export const HATCH_WORDS: Record<Hatch, string> = {
-  polyester: 'polyester: parallel diagonals',
-  polyethylene: 'polyethylene: horizontals',
-  polypropylene: 'polypropylene: broken diagonals',
-  'humidity-sensitive barrier': 'humidity-sensitive barrier: dots',
-  polyamide: 'polyamide: crossed diagonals',
-  chlorinated: 'PVdC or PVC: verticals',
-  styrenic: 'styrenic: squares',
-  biopolymer: 'biopolymer: plus signs',
-  cellulose: 'cellulose: waves',
-  paper: 'paper: short fibres',
-  metal: 'metal: solid',
-  oxide: 'oxide: solid, second ink',
-  adhesive: 'adhesive, ink or lacquer: plain tint',
-  other: 'other: empty',
-};
-
 export interface HatchedLayer {
   materialClass: string;
   /** Splits the polyolefins and the celluloses; '' where unknown. */

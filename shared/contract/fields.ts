@@ -145,7 +145,7 @@ export const pageQuerySchema = yup
   })
   .noUnknown();
 
-export const ARCHIVED_FILTERS = ['no', 'only'] as const;
+const ARCHIVED_FILTERS = ['no', 'only'] as const;
 export type ArchivedFilter = (typeof ARCHIVED_FILTERS)[number];
 
 /** What a list of kept things may be asked for besides the page. */
@@ -158,7 +158,7 @@ const keptListFilters = {
 
 export const keptListQuerySchema = yup.object({ ...pageQuerySchema.fields, ...keptListFilters }).noUnknown();
 
-export const STUDY_SORTS = ['newest', 'name', 'days'] as const;
+const STUDY_SORTS = ['newest', 'name', 'days'] as const;
 /** 'newest' if absent; 'name': from A; 'days': the longest life first. */
 export type StudySort = (typeof STUDY_SORTS)[number];
 

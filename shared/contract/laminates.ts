@@ -3,7 +3,7 @@ import { closedObject, idField, nameField, quantity, typedValuesField } from './
 import { MOST_LAYERS, RULES } from './rules';
 
 /** One layer of a laminate: a material at one of its revisions, and its gauge (a coating's own thickness). */
-export const laminateLayerSchema = closedObject({
+const laminateLayerSchema = closedObject({
   material_id: idField('Material'),
   material_revision_id: idField('Material revision'),
   thickness_um: quantity({ ...RULES.gauge }),

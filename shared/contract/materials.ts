@@ -34,7 +34,7 @@ export const PROVENANCE_KINDS = [
 ] as const;
 
 /** A value as its data sheet states it: what the person typed, kept beside the SI coefficients worked out from it. */
-export const statedValueSchema = closedObject({
+const statedValueSchema = closedObject({
   value: quantity(RULES.statedValue),
   unit: yup.string().strict().required('Unit: choose one.').max(60),
   /** Films stated as a rate or permeance: the gauge that was measured. Absent where the unit holds for any gauge. */

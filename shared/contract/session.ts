@@ -17,7 +17,7 @@ export const DEMO_MAILBOX_PATH = '/api/demo/mailbox';
 export const ROLES = ['engineer', 'admin', 'supplier', 'client'] as const;
 export type Role = (typeof ROLES)[number];
 
-export const UNIT_SYSTEMS = ['metric', 'us_customary'] as const;
+const UNIT_SYSTEMS = ['metric', 'us_customary'] as const;
 export type UnitSystem = (typeof UNIT_SYSTEMS)[number];
 
 const LONGEST_EMAIL = 254;

@@ -16,8 +16,10 @@ export const humidityCurveSchema = closedObject({
     .array(quantity(RULES.humidityFactor))
     .strict()
     .required('Humidity curve: give a factor for each humidity.'),
-}).test('paired', 'Humidity curve: give one factor for each humidity.', (curve) =>
-  curve?.relative_humidity?.length === curve?.factor?.length,
+}).test(
+  'paired',
+  'Humidity curve: give one factor for each humidity.',
+  (curve) => curve?.relative_humidity?.length === curve?.factor?.length,
 );
 
 const gasConditions = {
@@ -25,8 +27,18 @@ const gasConditions = {
   activation_energy_J_per_mol: optionalQuantity(RULES.activationEnergy),
   humidity_curve: humidityCurveSchema.optional().default(undefined),
   reference_relative_humidity: optionalQuantity({ ...RULES.relativeHumidity, label: 'Reference humidity' }),
-  measured_temperature_min_C: optionalQuantity({ ...RULES.temperature, label: 'Lowest measured temperature', min: -100, max: 200 }),
-  measured_temperature_max_C: optionalQuantity({ ...RULES.temperature, label: 'Highest measured temperature', min: -100, max: 200 }),
+  measured_temperature_min_C: optionalQuantity({
+    ...RULES.temperature,
+    label: 'Lowest measured temperature',
+    min: -100,
+    max: 200,
+  }),
+  measured_temperature_max_C: optionalQuantity({
+    ...RULES.temperature,
+    label: 'Highest measured temperature',
+    min: -100,
+    max: 200,
+  }),
 };
 
 export const filmGasSchema = closedObject({
@@ -45,7 +57,11 @@ export const defectsSchema = closedObject({
 });
 
 const filmSchema = closedObject({
-  kind: yup.string().strict().oneOf(['film'] as const).required(),
+  kind: yup
+    .string()
+    .strict()
+    .oneOf(['film'] as const)
+    .required(),
   name: nameField('Layer'),
   thickness_um: quantity(RULES.gauge),
   oxygen: filmGasSchema.required('Oxygen: give the permeability.'),
@@ -53,7 +69,11 @@ const filmSchema = closedObject({
 });
 
 const coatingSchema = closedObject({
-  kind: yup.string().strict().oneOf(['coating'] as const).required(),
+  kind: yup
+    .string()
+    .strict()
+    .oneOf(['coating'] as const)
+    .required(),
   name: nameField('Layer'),
   thickness_um: optionalQuantity(RULES.ownThickness),
   oxygen: coatingGasSchema.required('Oxygen: give the permeance.'),
@@ -62,7 +82,11 @@ const coatingSchema = closedObject({
 });
 
 const foilSchema = closedObject({
-  kind: yup.string().strict().oneOf(['foil'] as const).required(),
+  kind: yup
+    .string()
+    .strict()
+    .oneOf(['foil'] as const)
+    .required(),
   name: nameField('Layer'),
   thickness_um: quantity(RULES.gauge),
   defects: defectsSchema.optional().default(undefined),
@@ -83,10 +107,12 @@ const unknownKindSchema = closedObject({
 
 export const layerSchema = yup.lazy((layer: unknown) => {
   const kind = typeof layer === 'object' && layer !== null && 'kind' in layer ? layer.kind : undefined;
-  return kind === 'film' || kind === 'coating' || kind === 'foil' ? LAYER_SCHEMA_BY_KIND[kind] : unknownKindSchema;
+  return kind === 'film' || kind === 'coating' || kind === 'foil'
+    ? LAYER_SCHEMA_BY_KIND[kind]
+    : unknownKindSchema;
 });
 
-export const wallSchema = closedObject({
+const wallSchema = closedObject({
   name: nameField('Wall'),
   area_m2: quantity(RULES.area),
   layers: yup
@@ -97,7 +123,7 @@ export const wallSchema = closedObject({
     .max(MOST_LAYERS, `Wall: at most ${MOST_LAYERS} layers.`),
 });
 
-export const sealSchema = closedObject({
+const sealSchema = closedObject({
   sealant_thickness_um: quantity({ ...RULES.gauge, label: 'Sealant thickness', max: 4000 }),
   length_mm: quantity({ ...RULES.packLength, label: 'Seal length', max: 100_000 }),
   width_mm: quantity({ ...RULES.sealWidth, label: 'Seal width', isMinExcluded: true }),
@@ -111,7 +137,7 @@ export const leaksSchema = closedObject({
   diameter_um: quantity(RULES.channelDiameter),
 });
 
-export const packDescriptionSchema = closedObject({
+const packDescriptionSchema = closedObject({
   walls: yup
     .array(wallSchema)
     .strict()
@@ -119,19 +145,30 @@ export const packDescriptionSchema = closedObject({
     .min(1, 'Pack: give at least one wall.')
     .max(MOST_WALLS, `Pack: at most ${MOST_WALLS} walls.`),
   headspace_cm3: optionalQuantity(RULES.headspace),
-  starting_headspace_oxygen_percent: optionalQuantity({ ...RULES.headspaceOxygen, label: 'Starting headspace oxygen' }),
+  starting_headspace_oxygen_percent: optionalQuantity({
+    ...RULES.headspaceOxygen,
+    label: 'Starting headspace oxygen',
+  }),
   seal: sealSchema.optional().default(undefined),
   leaks: leaksSchema.optional().default(undefined),
 });
 
 const linearIsothermSchema = closedObject({
-  type: yup.string().strict().oneOf(['linear'] as const).required(),
+  type: yup
+    .string()
+    .strict()
+    .oneOf(['linear'] as const)
+    .required(),
   slope_g_per_g: quantity(RULES.isothermSlope),
   intercept_g_per_g: quantity(RULES.isothermIntercept),
 });
 
 const gabIsothermSchema = closedObject({
-  type: yup.string().strict().oneOf(['GAB'] as const).required(),
+  type: yup
+    .string()
+    .strict()
+    .oneOf(['GAB'] as const)
+    .required(),
   Xm_g_per_g: quantity(RULES.gabMonolayer),
   C: quantity(RULES.gabC),
   K: quantity(RULES.gabK),
@@ -174,7 +211,7 @@ export const foodDescriptionSchema = closedObject({
   inside_relative_humidity: optionalQuantity({ ...RULES.relativeHumidity, label: 'Humidity inside' }),
 });
 
-export const legSchema = closedObject({
+const legSchema = closedObject({
   name: yup.string().strict().max(120).optional(),
   temperature_C: quantity(RULES.temperature),
   relative_humidity: quantity(RULES.relativeHumidity),

@@ -14,14 +14,14 @@ import { RULES } from './rules';
  * GET   …/studies/<id>/results/<result id>
  */
 export const MOST_LAMINATES_IN_STUDY = 8;
-export const MOST_TAGS = 10;
-export const LONGEST_TAG = 30;
+const MOST_TAGS = 10;
+const LONGEST_TAG = 30;
 
-export const VERDICTS = ['open', 'chosen', 'dropped'] as const;
+const VERDICTS = ['open', 'chosen', 'dropped'] as const;
 export type Verdict = (typeof VERDICTS)[number];
 
 /** Why a laminate was chosen or dropped. */
-export const laminateNoteSchema = closedObject({
+const laminateNoteSchema = closedObject({
   laminate_id: idField('Wall'),
   verdict: yup
     .string()

@@ -35,7 +35,7 @@ const share = () => yup.number().strict().min(0).max(1).required();
 const amount = () => yup.number().strict().min(0).nullable().defined();
 const names = () => yup.array(text()).strict().required();
 
-export const makeUpSchema = closedObject({
+const makeUpSchema = closedObject({
   mass_g_per_m2: amount(),
   cut_area_m2: yup.number().strict().required(),
   mass_g_per_pack: amount(),

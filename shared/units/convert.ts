@@ -13,12 +13,12 @@ export class UnitError extends Error {
   }
 }
 
-export function isUnitName(name: string): name is UnitName {
+function isUnitName(name: string): name is UnitName {
   return Object.prototype.hasOwnProperty.call(UNITS, name);
 }
 
 /** The unit of that name; throws UnitError for a name that is none. */
-export function unitNamed(name: string): Unit {
+function unitNamed(name: string): Unit {
   if (!isUnitName(name)) throw new UnitError(name, null, `"${name}" is not a unit known here.`);
   return UNITS[name];
 }

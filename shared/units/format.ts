@@ -30,7 +30,7 @@ const same = (unit: string, factor = 1): DisplayKind => ({
   us_customary: { unit, factor },
 });
 
-export const DISPLAY_KINDS = {
+const DISPLAY_KINDS = {
   number: same(''),
   days: same('days'),
   percent: same('%'),

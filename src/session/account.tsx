@@ -32,7 +32,7 @@ export function toAccount(membership: Membership, userId: string): Account {
   return { ...account, userId, roles, company, basePath: accountBasePath(account.slug) };
 }
 
-export function accountBasePath(slug: string): string {
+function accountBasePath(slug: string): string {
   return `/a/${encodeURIComponent(slug)}`;
 }
 

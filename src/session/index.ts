@@ -1,15 +1,7 @@
 export { SessionProvider, useSession, useSessionActions, useUnitSystem } from './session-provider';
 export type { SessionActions } from './session-provider';
 export type { SessionEvent, SessionState } from './session-reducer';
-export {
-  AccountProvider,
-  accountBasePath,
-  hasRole,
-  landingHref,
-  landingPlace,
-  toAccount,
-  useAccount,
-} from './account';
+export { AccountProvider, hasRole, landingHref, landingPlace, toAccount, useAccount } from './account';
 export type { Account } from './account';
 export { RoleGate } from './role-gate';
 export { useDraft, type Draft } from './use-draft';

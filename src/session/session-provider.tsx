@@ -91,7 +91,7 @@ export function SessionProvider({ children }: { children: ReactNode }) {
   return <SessionContext.Provider value={value}>{children}</SessionContext.Provider>;
 }
 
-export function useSessionContext(): SessionContextValue {
+function useSessionContext(): SessionContextValue {
   const value = useContext(SessionContext);
   if (value === null) throw new Error('useSession needs a SessionProvider above it.');
   return value;

@@ -1,7 +1,7 @@
 export * from './tokens';
 export { ThemeProvider, ThemeScope, useTheme, type Theme, type SchemePreference } from './theme';
 export { useIsWide, useIsAtLeast } from './use-is-wide';
-export { NavigationProvider, useAnchorClick, useNavigation, type Navigation } from './navigation';
+export { NavigationProvider, useAnchorClick, type Navigation } from './navigation';
 
 // Layout
 export { Screen, type ScreenProps } from './screen';
@@ -12,7 +12,6 @@ export { TitleBlock, type TitleBlockProps, type TitleBlockCell } from './title-b
 export { Strip, type StripProps, type StripCell } from './strip';
 export { Row, type RowProps } from './row';
 export { Divider } from './divider';
-export { VisuallyHidden } from './visually-hidden';
 
 // Words and figures
 export {

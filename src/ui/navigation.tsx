@@ -20,7 +20,7 @@ export function NavigationProvider({
   return <NavigationContext.Provider value={navigation}>{children}</NavigationContext.Provider>;
 }
 
-export function useNavigation(): Navigation {
+function useNavigation(): Navigation {
   return useContext(NavigationContext);
 }
 

@@ -12,7 +12,7 @@ export interface Place {
 const KEEPERS: readonly Role[] = ['engineer', 'admin'];
 
 /** In the order in which they stand. Rights are the API's; this only spares people what they cannot use. */
-export const PLACES: readonly Place[] = [
+const PLACES: readonly Place[] = [
   { path: 'studies', label: 'Studies', icon: 'studies', roles: KEEPERS },
   { path: 'walls', label: 'Walls', icon: 'walls', roles: KEEPERS },
   { path: 'materials', label: 'Materials', icon: 'materials', roles: KEEPERS },
