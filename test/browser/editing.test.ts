@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { DEVICES, expectNoAxeViolations, screenshot, type Device, type JourneyPage } from './harness/browser';
-import { useJourneyFile } from './harness/journey-file';
+import { openJourneyFile } from './harness/journey-file';
 import { insertOwnAccount, insertStock } from './harness/own-account';
 import { field, fillFields, shownText } from './steps/fields';
 import { newPasswordLink } from './steps/mailbox';
@@ -8,7 +8,7 @@ import { waitForTitle } from './steps/places';
 import { openSignIn, signIn } from './steps/sign-in';
 import { gaugeField, layerNames, saveWallRevision } from './steps/walls';
 
-const file = useJourneyFile();
+const file = openJourneyFile();
 
 describe.each(Object.keys(DEVICES) as Device[])('editing on %s', (device) => {
   const { width } = DEVICES[device].viewport;

@@ -2,14 +2,14 @@ import type { Page } from 'playwright-core';
 import { describe, expect, it } from 'vitest';
 import { demoPeople } from '../../server/db/seed/demo-people';
 import { DEVICES, expectNoAxeViolations, screenshot, type Device, type JourneyPage } from './harness/browser';
-import { useJourneyFile } from './harness/journey-file';
+import { openJourneyFile } from './harness/journey-file';
 import { hasVisibleFocus, tabTo, typeChoice, typeOver, type TabTarget } from './harness/keyboard';
 import { readAnswer } from './steps/answer';
 import { field, shownText } from './steps/fields';
 import { waitForTitle } from './steps/places';
 import { layerNames } from './steps/walls';
 
-const file = useJourneyFile();
+const file = openJourneyFile();
 
 describe.each(Object.keys(DEVICES) as Device[])('an engineer with a keyboard alone, %s', (device) => {
   it('goes from sign-in to the answer of a new study with a wall of their own', async () => {

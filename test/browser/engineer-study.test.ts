@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { DEVICES, expectNoAxeViolations, screenshot, type Device, type JourneyPage } from './harness/browser';
-import { useJourneyFile } from './harness/journey-file';
+import { openJourneyFile } from './harness/journey-file';
 import { insertOwnAccount, type OwnPerson } from './harness/own-account';
 import { readAnswer, type ReadAnswer } from './steps/answer';
 import { drawingNames, openTable } from './steps/charts';
@@ -57,7 +57,7 @@ const FILMS: FilmDataSheet[] = [
 const WALL = 'PET 12 / EVOH 5 / LDPE 50';
 const STUDY = 'Dry biscuits by sea';
 
-const file = useJourneyFile();
+const file = openJourneyFile();
 
 describe.each(Object.keys(DEVICES) as Device[])('an engineer on %s', (device) => {
   it('goes from three data sheets to the days one food keeps, and what ends them', async () => {

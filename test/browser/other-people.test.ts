@@ -1,11 +1,11 @@
 import { describe, expect, it } from 'vitest';
 import { demoPeople } from '../../server/db/seed/demo-people';
 import { DEVICES, expectNoAxeViolations, screenshot, type Device } from './harness/browser';
-import { useJourneyFile } from './harness/journey-file';
+import { openJourneyFile } from './harness/journey-file';
 import { waitForTitle } from './steps/places';
 import { signIn } from './steps/sign-in';
 
-const file = useJourneyFile();
+const file = openJourneyFile();
 
 const FIRST_SCREENS = [
   { role: 'supplier', title: 'Requests', says: 'Nothing is waiting for you now', notTheirs: 'studies' },

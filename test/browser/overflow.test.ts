@@ -2,7 +2,7 @@ import type { Page } from 'playwright-core';
 import { describe, expect, it } from 'vitest';
 import { demoPeople } from '../../server/db/seed/demo-people';
 import { DEVICES, expectNoAxeViolations, screenshot, type JourneyPage } from './harness/browser';
-import { useJourneyFile } from './harness/journey-file';
+import { openJourneyFile } from './harness/journey-file';
 import { signIn } from './steps/sign-in';
 import {
   engineerScreens,
@@ -15,7 +15,7 @@ import {
 
 const NARROW_PX = 360;
 
-const file = useJourneyFile();
+const file = openJourneyFile();
 
 function openNarrowPage() {
   return file.browser().openPage('phone', { viewport: { ...DEVICES.phone.viewport, width: NARROW_PX } });

@@ -62,7 +62,7 @@ async function openPage(browser: Browser, options: BrowserContextOptions): Promi
   onTestFailed(async ({ task }) => {
     if (page.isClosed()) return;
     // What went wrong on the page is most often why the journey found no way on.
-    for (const fault of faults.list()) console.error(fault);
+    for (const fault of faults.list()) process.stderr.write(`${fault}\n`);
     await screenshot(page, `failed-${task.id}`);
     await context.close();
   });

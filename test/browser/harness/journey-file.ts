@@ -8,7 +8,7 @@ export interface JourneyFile {
 }
 
 /** One server over one database and one browser for all journeys of a file. */
-export function useJourneyFile(): JourneyFile {
+export function openJourneyFile(): JourneyFile {
   let product: RunningProduct | undefined;
   let browser: JourneyBrowser | undefined;
   beforeAll(async () => {
