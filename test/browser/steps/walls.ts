@@ -26,7 +26,7 @@ export async function layerNames(page: Page): Promise<string[]> {
   return labels.map((label) => label.replace(/, layer \d+ of \d+$/, ''));
 }
 
-export function layerRows(page: Page): Locator {
+function layerRows(page: Page): Locator {
   return page.getByRole('list', { name: /^Layers, outside first/ }).getByRole('listitem');
 }
 
@@ -34,7 +34,7 @@ export function gaugeField(page: Page, material: string): Locator {
   return page.getByRole('textbox', { name: new RegExp(`^Gauge of ${material}, layer \\d+ of \\d+, µm$`) });
 }
 
-export function layerButton(page: Page, action: RegExp): Locator {
+function layerButton(page: Page, action: RegExp): Locator {
   return page.getByRole('button', { name: action });
 }
 
