@@ -71,7 +71,10 @@ function fromBodyParser(error: unknown): AppError | undefined {
   if (error instanceof URIError) return notFound();
   const status = 'status' in error ? error.status : undefined;
   if (status === 413)
-    return new AppError('file_too_large', 'The request is larger than this address takes (1 MB, or 10 kB before signing in). Send less at once.');
+    return new AppError(
+      'file_too_large',
+      'The request is larger than this address takes (1 MB, or 10 kB before signing in). Send less at once.',
+    );
   const type = 'type' in error ? error.type : undefined;
   if (type === 'entity.parse.failed') {
     return inputInvalid([

@@ -8,7 +8,11 @@ import { storageDescriptionShape } from './storage-description';
 export const EVALUATIONS_PATH = '/api/evaluations';
 
 export const oxygenTestSchema = closedObject({
-  gas: yup.string().strict().oneOf(['oxygen'] as const).required(),
+  gas: yup
+    .string()
+    .strict()
+    .oneOf(['oxygen'] as const)
+    .required(),
   name: yup.string().strict().max(120).optional(),
   temperature_C: quantity(RULES.temperature),
   relative_humidity_outside: quantity({ ...RULES.relativeHumidity, label: 'Humidity outside' }),
@@ -17,12 +21,20 @@ export const oxygenTestSchema = closedObject({
 });
 
 export const waterTestSchema = closedObject({
-  gas: yup.string().strict().oneOf(['water'] as const).required(),
+  gas: yup
+    .string()
+    .strict()
+    .oneOf(['water'] as const)
+    .required(),
   name: yup.string().strict().max(120).optional(),
   temperature_C: quantity(RULES.temperature),
   relative_humidity_high: quantity({ ...RULES.relativeHumidity, label: 'Humidity of the moist side' }),
   relative_humidity_low: quantity({ ...RULES.relativeHumidity, label: 'Humidity of the dry side' }),
-  moist_side: yup.string().strict().oneOf(['outside', 'inside'] as const).optional(),
+  moist_side: yup
+    .string()
+    .strict()
+    .oneOf(['outside', 'inside'] as const)
+    .optional(),
 }).test(
   'gradient',
   'Test: the moist side must be moister than the dry side.',

@@ -209,7 +209,9 @@ async function turnTheWallRound(visit: JourneyPage, judge: Judge, asBuilt: ReadA
   const why =
     /EVOH sits at [\d.]+ % humidity as laid and at [\d.]+ % turned round, and its oxygen barrier depends on/;
   expect(await shownText(turned)).toMatch(why);
-  const foretold = /Day of the oxygen uptake limit, whole route\s+(\d+)\s+(\d+)/.exec(await shownText(turned));
+  const foretold = /Day of the oxygen uptake limit, whole route\s+(\d+)\s+(\d+)/.exec(
+    await shownText(turned),
+  );
   expect(foretold?.[1]).toBe(String(asBuilt.oxygenDay));
 
   await goToPlace(visit, 'Walls');

@@ -34,10 +34,6 @@ export function gaugeField(page: Page, material: string): Locator {
   return page.getByRole('textbox', { name: new RegExp(`^Gauge of ${material}, layer \\d+ of \\d+, µm$`) });
 }
 
-function layerButton(page: Page, action: RegExp): Locator {
-  return page.getByRole('button', { name: action });
-}
-
 export async function setBothSides(page: Page, humidity: string): Promise<void> {
   await fillFields(sheet(page, 'The wall'), {
     Temperature: '23',
