@@ -37,6 +37,20 @@ export function openDatabase(url: string): DatabaseConnection {
       idle_in_transaction_session_timeout: IDLE_IN_TRANSACTION_TIMEOUT_MS,
     },
   });
+  prepareStatements(sql);
   const db = drizzle(sql, { schema });
   return { db, sql, close: () => sql.end({ timeout: 2 }) };
+}
+
+/**
+ * Drizzle hands its queries to `unsafe`, which asks the database to describe each one before it is run: two round trips
+ * where a prepared statement takes one. Session and role are looked up at every request, so they are prepared.
+ */
+function prepareStatements(sql: postgres.Sql): void {
+  const plain = sql.unsafe;
+  sql.unsafe = ((query, parameters, options) =>
+    plain(query, parameters, {
+      ...options,
+      prepare: options?.prepare ?? (parameters?.length ?? 0) > 0,
+    })) as typeof sql.unsafe;
 }

@@ -1,24 +1,26 @@
 import { evaluate, type EvaluationAnswer, type EvaluationDescription } from '../../../shared/engine';
 import type { EnginePort } from '../../jobs/engine-workers';
 
-/** Leg passes that stay well below 50 ms where nothing feels humidity: a leg is then a closed form. */
+/** Leg passes that stay well below 50 ms with few points on humidity curves. */
 const MOST_INLINE_PASSES = 24;
+/** All curves together: a usual barrier layer has eight. A curve's cost grows with its points and its zigzags. */
+const MOST_INLINE_CURVE_POINTS = 40;
 
 /** Computations whose cost is known to be small run here, all others in a thread, so that nobody waits for them. */
 export async function evaluateDescription(
   engine: EnginePort,
   description: EvaluationDescription,
 ): Promise<EvaluationAnswer> {
-  const isSmall = !hasHumidityCurve(description) && legPasses(description) <= MOST_INLINE_PASSES;
+  const isSmall =
+    curvePoints(description) <= MOST_INLINE_CURVE_POINTS && legPasses(description) <= MOST_INLINE_PASSES;
   return isSmall ? evaluate(description) : engine.evaluate(description);
 }
 
-/** A curve's cost depends on its shape, so any curve counts as large. */
-function hasHumidityCurve({ pack }: EvaluationDescription): boolean {
+function curvePoints({ pack }: EvaluationDescription): number {
   const layers = pack.walls.flatMap((wall) => wall.layers);
   const gases = layers.flatMap((layer) => (layer.kind === 'foil' ? [] : [layer.oxygen, layer.water]));
   const sealGases = pack.seal ? [pack.seal.oxygen, pack.seal.water] : [];
-  return [...gases, ...sealGases].some((gas) => gas.humidity_curve !== undefined);
+  return [...gases, ...sealGases].reduce((sum, gas) => sum + (gas.humidity_curve?.factor.length ?? 0), 0);
 }
 
 /** How many legs are integrated until the horizon, with a surcharge for many layers. */
